@@ -1,0 +1,6 @@
+//! What the compiler says to people: one plain value for the terminal, JSON and editors alike.
+
+pub mod codes;
+mod diagnostic;
+
+pub use diagnostic::{Code, Diagnostic, Label, Severity};

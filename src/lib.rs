@@ -1,0 +1,9 @@
+//! Stagewright: text → syntax tree → checked model → flight → report.
+
+pub mod diagnostics;
+pub mod flight;
+pub mod math;
+pub mod model;
+pub mod quantity;
+pub mod source;
+pub mod syntax;

@@ -1,0 +1,5 @@
+//! Dimensions, units, and numbers as people write and read them.
+
+mod dimension;
+
+pub use dimension::Dimension;
