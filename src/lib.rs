@@ -1,5 +1,6 @@
 //! Stagewright: text → syntax tree → checked model → flight → report.
 
+pub mod check;
 pub mod diagnostics;
 pub mod flight;
 pub mod math;
