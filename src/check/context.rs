@@ -64,11 +64,20 @@ impl<'a> Context<'a> {
         None
     }
 
-    /// For a mission with air: reports each engine of the vehicle that says nothing about sea
-    /// level. `flies` is the place of the mission's `flies` fact.
-    pub(crate) fn check_engines_in_air(&mut self, vehicle: BlockId, world: BlockId, flies: Span) {
+    /// For a mission in a world with air: reports each engine of the vehicle that says nothing
+    /// about sea level, and a vehicle that says nothing about drag. `flies` is the place of the
+    /// mission's `flies` fact.
+    pub(crate) fn check_in_air(&mut self, vehicle: BlockId, world: BlockId, flies: Span) {
         let _ = (vehicle, world, flies);
     }
+
+    /// Facts recorded and blocks looked up from here to [`Context::leave`] belong to this block
+    /// (a mission); see [`Context::facts_of`].
+    pub(crate) fn enter(&mut self, block: BlockId) {
+        let _ = block;
+    }
+
+    pub(crate) fn leave(&mut self) {}
 
     /// Reports a statement that has no place in a block of this kind, or a key that no fact of it
     /// has, with the nearest of `keys`.

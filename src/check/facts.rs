@@ -85,8 +85,8 @@ impl<'a> Context<'a> {
         self.facts.get(fact.0 as usize).map_or_else(Dimension::default, |fact| fact.dimension)
     }
 
-    /// The facts that a vehicle, a world or anything else takes in, those of the blocks that it
-    /// names included, in order of the source; with the givens that they use.
+    /// The facts of a block (a mission above all), those of the blocks and givens that it uses
+    /// included, in order of the source.
     pub(crate) fn facts_of(&self, block: BlockId) -> Vec<FactId> {
         let _ = block;
         Vec::new()
