@@ -15,6 +15,20 @@ macro_rules! codes {
 }
 
 codes! {
+    expression_limit,
+    file_too_large,
+    misplaced_fact,
+    missing_line_break,
+    nesting_limit,
+    not_utf8,
+    number_out_of_range,
+    number_without_digits,
+    operator_needs_blanks,
+    stray_brace,
+    too_many_facts,
+    unclosed_block,
+    unclosed_text,
+    unexpected_text,
     unknown_name,
 }
 
