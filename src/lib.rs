@@ -8,3 +8,4 @@ pub mod model;
 pub mod quantity;
 pub mod source;
 pub mod syntax;
+pub mod world;

@@ -1,0 +1,61 @@
+//! Air: its density, pressure, speed of sound and temperature by altitude.
+
+mod exponential;
+mod standard_1976;
+
+pub use exponential::Exponential;
+
+use crate::math::Scalar;
+
+/// The air at one altitude.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub struct AirState<S> {
+    /// kg/m³
+    pub density: S,
+    /// Pa
+    pub pressure: S,
+    /// m/s
+    pub sound_speed: S,
+    /// K
+    pub temperature: S,
+}
+
+/// A model of the air.
+#[derive(Clone, Copy, Debug)]
+pub enum Air<S> {
+    None,
+    /// U.S. Standard Atmosphere, 1976, from 5 km below the ellipsoid to 1000 km above it.
+    Standard1976,
+    Exponential(Exponential<S>),
+}
+
+impl<S: Scalar> Air<S> {
+    /// The air at a geodetic altitude in m; nothing where there is no air, or none of the model's.
+    ///
+    /// Below its lowest layer a model goes on as it is there.
+    #[inline]
+    pub fn at(&self, altitude: S) -> Option<AirState<S>> {
+        match self {
+            Air::None => None,
+            Air::Standard1976 => standard_1976::at(altitude),
+            Air::Exponential(exponential) => Some(exponential.at(altitude)),
+        }
+    }
+
+    /// Geodetic altitudes in m, ascending, where a formula gives way to another. Some derivative of
+    /// the air jumps there, so a step of the integration ends there.
+    pub fn layer_altitudes(&self) -> &'static [f64] {
+        match self {
+            Air::Standard1976 => &standard_1976::LAYER_ALTITUDES,
+            Air::None | Air::Exponential(_) => &[],
+        }
+    }
+
+    /// Geodetic altitude in m above which the model knows no air, if it has such an end.
+    pub fn top(&self) -> Option<f64> {
+        match self {
+            Air::Standard1976 => Some(standard_1976::TOP),
+            Air::None | Air::Exponential(_) => None,
+        }
+    }
+}
