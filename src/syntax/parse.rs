@@ -7,7 +7,11 @@ use super::lines;
 use super::rules::{Grammar, Rule};
 use super::{Item, Tree};
 use crate::diagnostics::Diagnostic;
+use crate::diagnostics::codes::{file_too_large, nesting_limit};
 use crate::source::{FileId, Span};
+
+/// The largest file in bytes.
+pub(super) const SIZE_LIMIT: usize = 4 << 20;
 
 /// A tree, always, and what is wrong with the text, in its order.
 #[derive(Clone, Debug)]
@@ -16,17 +20,30 @@ pub struct Parsed {
     pub diagnostics: Vec<Diagnostic>,
 }
 
-/// Reads one file. Any text gives a tree, in time linear in its length.
+/// Reads one file. Any text gives a tree, in time linear in its length; what is wrong with it is
+/// told for each broken line once, a thousand times at most.
 pub fn parse(file: FileId, text: &str) -> Parsed {
+    if text.len() > SIZE_LIMIT {
+        let diagnostics = vec![file_too_large::found(Span::new(file, 0, 0), text.len(), SIZE_LIMIT)];
+        return Parsed {
+            tree: Tree { items: vec![Item::Broken(Span::new(file, 0, 0))], ..Tree::default() },
+            diagnostics,
+        };
+    }
     let read = lines::read(file, text);
     let mut builder = Builder::new(file, text, &read.text);
     let items = match Grammar::parse(Rule::file, &read.text) {
         Ok(pairs) => builder.file(pairs),
-        // invariant: the rule `file` takes any text, so this arm is for a fault of the grammar alone.
-        Err(_) => vec![Item::Broken(Span::new(file, 0, text.len()))],
+        // The rule `file` takes any text. What is left is a caller with next to no stack, to which
+        // the nesting of any text is too deep.
+        Err(_) => {
+            let whole = Span::new(file, 0, text.len());
+            builder.diagnostics.push(nesting_limit::found(whole, 0));
+            vec![Item::Broken(whole)]
+        }
     };
     let mut diagnostics = read.diagnostics;
     diagnostics.append(&mut builder.diagnostics);
-    diagnostics.sort_by_key(|diagnostic| diagnostic.span());
+    diagnostics.sort_by_key(Diagnostic::span);
     Parsed { tree: Tree { items, comments: read.comments }, diagnostics }
 }

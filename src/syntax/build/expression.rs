@@ -2,10 +2,10 @@
 
 use super::Builder;
 use super::parts::Parts;
-use crate::diagnostics::codes::expression_limit;
+use crate::diagnostics::codes::{expression_limit, operator_needs_blanks, unexpected_text};
 use crate::source::Span;
 use crate::syntax::rules::{Pair, Rule};
-use crate::syntax::{Expr, ExprKind, Operator};
+use crate::syntax::{Expr, ExprKind, Name, Operator};
 
 /// The most operators in one expression, those within brackets included. It bounds the depth of the
 /// tree, and so every walk over it.
@@ -23,6 +23,24 @@ impl Builder<'_> {
         parts.find(Rule::expr).map(|pair| self.expr(pair))
     }
 
+    /// The value that follows a name. The grammar takes `a-b` as the name `a` and the value `-b`,
+    /// which nobody means.
+    pub(super) fn value_of(&mut self, name: &Name, parts: &mut Parts<'_>) -> Option<Expr> {
+        let pair = parts.find(Rule::expr)?;
+        let start = self.span(&pair).start;
+        if start == name.span.end {
+            let at = Span { start, end: start + 1, ..name.span };
+            match pair.as_str().get(..1) {
+                Some("-") => self.report(|| operator_needs_blanks::found(at, "-")),
+                other => {
+                    let found = format!("`{}`", other.unwrap_or(""));
+                    self.report(|| unexpected_text::found(at, &found, "a blank"));
+                }
+            }
+        }
+        Some(self.expr(pair))
+    }
+
     /// An outermost expression.
     pub(super) fn expr(&mut self, pair: Pair<'_>) -> Expr {
         let span = self.span(&pair);
@@ -32,7 +50,7 @@ impl Builder<'_> {
             let count =
                 operators.filter(|part| matches!(part.as_rule(), Rule::operator | Rule::minus)).count();
             if count > OPERATOR_LIMIT {
-                self.diagnostics.push(expression_limit::found(span, count, OPERATOR_LIMIT));
+                self.report(|| expression_limit::found(span, count, OPERATOR_LIMIT));
                 return Expr { span, kind: ExprKind::Broken };
             }
         }
@@ -102,7 +120,7 @@ impl Builder<'_> {
     fn primary(&mut self, pair: Pair<'_>) -> Option<Expr> {
         let span = self.span(&pair);
         let kind = match pair.as_rule() {
-            Rule::quantity => ExprKind::Number(self.quantity(pair)?),
+            Rule::quantity => self.quantity(pair).map_or(ExprKind::Broken, ExprKind::Number),
             Rule::path => ExprKind::Path(self.path(pair)),
             Rule::group => return Parts::of(pair).find(Rule::expr).map(|inner| self.inner_expr(inner)),
             Rule::call => {

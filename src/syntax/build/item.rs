@@ -14,6 +14,7 @@ impl Builder<'_> {
 
     fn item(&mut self, pair: Pair<'_>) -> Item {
         let span = self.span(&pair);
+        self.misplaced &= matches!(pair.as_rule(), Rule::stray_close | Rule::broken_item);
         let item = match pair.as_rule() {
             Rule::bring => self.bring(pair).map(Item::Bring),
             Rule::unit_definition => self.unit_definition(pair).map(Item::Unit),

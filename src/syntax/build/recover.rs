@@ -1,34 +1,91 @@
 //! What is said about broken pieces.
 
 use super::Builder;
-use super::block::Head;
-use crate::diagnostics::codes::{missing_line_break, stray_brace, unclosed_block, unexpected_text};
+use super::block::{Head, block_kind};
+use crate::diagnostics::codes::{
+    misplaced_fact, missing_line_break, stray_brace, unclosed_block, unexpected_text,
+};
 use crate::source::Span;
+use crate::syntax::rules::Rule;
+use crate::syntax::{Name, look, words};
 
 impl Builder<'_> {
+    /// A `}` outside every block. After misplaced facts it is a consequence of the same mistake, a
+    /// block closed too early, and stays without a word.
     pub(super) fn stray_close(&mut self, span: Span) {
-        self.diagnostics.push(stray_brace::found(span));
+        if !std::mem::take(&mut self.misplaced) {
+            self.report(|| stray_brace::found(span));
+        }
     }
 
-    pub(super) fn missing_break(&mut self, span: Span) {
-        self.diagnostics.push(missing_line_break::found(span));
+    pub(super) fn missing_break(&mut self, at: Span) {
+        let rest = self.read.get(at.range().start..).unwrap_or("");
+        let end = at.range().start + words::token(rest).len();
+        self.report(|| missing_line_break::found(Span::new(at.file, at.range().start, end)));
     }
 
     pub(super) fn unclosed_block(&mut self, open: Span, end: Span) {
-        self.diagnostics.push(unclosed_block::found(open, end));
+        self.report(|| unclosed_block::found(open, end));
     }
 
+    /// Of facts outside every block that follow each other only the first is told.
     pub(super) fn broken_item(&mut self, span: Span) {
-        self.diagnostics.push(unexpected_text::found(span, "this", "a definition"));
+        let (file, read) = (self.file, self.read);
+        let starts_definition = words::first(read, span)
+            .is_some_and(|word| matches!(word, "bring" | "unit" | "given") || words::KINDS.contains(&word));
+        let entry = match words::first(read, span) {
+            Some(word) if words::KINDS.contains(&word) => Rule::lone_head,
+            _ if starts_definition => Rule::lone_item,
+            _ => Rule::lone_fact,
+        };
+        let was_misplaced = std::mem::take(&mut self.misplaced);
+        match look::stop(file, read, span, entry) {
+            Some(stop) if starts_definition || stop.at() == span.range().start => {
+                self.report(|| stop.diagnostic())
+            }
+            _ => {
+                self.misplaced = true;
+                if !was_misplaced {
+                    self.report(|| misplaced_fact::found(span));
+                }
+            }
+        }
     }
 
     pub(super) fn broken_line(&mut self, span: Span) {
-        self.diagnostics.push(unexpected_text::found(span, "this", "a fact"));
+        let (file, read) = (self.file, self.read);
+        let entry = match words::first(read, span) {
+            Some(word) if words::KINDS.contains(&word) => Rule::lone_head,
+            Some("bring" | "unit") => Rule::lone_item,
+            _ => Rule::lone_fact,
+        };
+        self.report(|| match look::stop(file, read, span, entry) {
+            Some(stop) => stop.diagnostic(),
+            None => unexpected_text::found(span, "a definition within a block", "a fact"),
+        });
     }
 
     /// Reports a broken head; gives its kind and name where they can be read.
-    pub(super) fn broken_head(&mut self, span: Span) -> Option<Head> {
-        self.diagnostics.push(unexpected_text::found(span, "this", "the head of a block"));
-        None
+    pub(super) fn broken_head(&mut self, head: Span) -> Option<Head> {
+        let (file, read) = (self.file, self.read);
+        let text = read.get(head.range())?;
+        let mut heads = text.split([' ', '{']).filter(|word| !word.is_empty());
+        let (first, second) = (heads.next().unwrap_or(""), heads.next());
+        let meant =
+            block_kind(first).map(|_| first).or_else(|| words::nearest(first, words::KINDS.iter().copied()));
+        let shaped = words::is_name(first) && second.is_none_or(words::is_name) && heads.next().is_none();
+        self.report(|| match look::stop(file, read, head, Rule::lone_head) {
+            Some(stop) if meant.is_some() || shaped => stop.diagnostic(),
+            _ => {
+                let brace = Span { start: head.end.saturating_sub(1).max(head.start), ..head };
+                unexpected_text::found(brace, "`{`", "the end of the line")
+                    .help("a block starts with its kind and its name, such as `stage Bracken {`")
+            }
+        });
+        let name = second.filter(|name| words::is_name(name))?;
+        let after = text.find(first)? + first.len();
+        let at = head.range().start + after + text.get(after..)?.find(name)?;
+        let span = Span::new(file, at, at + name.len());
+        Some((block_kind(meant?)?, Name { span, text: name.to_owned() }))
     }
 }

@@ -38,7 +38,7 @@ impl Builder<'_> {
         while let Some(argument) = parts.find(Rule::argument) {
             let mut inner = Parts::of(argument);
             let name = self.name(&inner.find(Rule::argument_name)?);
-            arguments.push(Argument { name, value: self.next_expr(&mut inner)? });
+            arguments.push(Argument { value: self.value_of(&name, &mut inner)?, name });
         }
         Some(arguments)
     }

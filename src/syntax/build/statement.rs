@@ -54,7 +54,8 @@ impl Builder<'_> {
 
     pub(super) fn given(&mut self, pair: Pair<'_>) -> Option<Given> {
         let mut parts = Parts::of(pair);
-        Some(Given { name: self.next_name(&mut parts)?, value: self.next_expr(&mut parts)? })
+        let name = self.next_name(&mut parts)?;
+        Some(Given { value: self.value_of(&name, &mut parts)?, name })
     }
 
     fn start(&mut self, parts: &mut Parts<'_>) -> Option<Statement> {

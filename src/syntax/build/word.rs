@@ -2,6 +2,7 @@
 
 use super::Builder;
 use super::parts::Parts;
+use crate::diagnostics::codes::number_out_of_range;
 use crate::source::Span;
 use crate::syntax::rules::{Pair, Rule};
 use crate::syntax::{Because, Literal, Name, Path, Quoted, UnitText};
@@ -66,7 +67,7 @@ impl Builder<'_> {
         self.literal(&number, span, unit)
     }
 
-    /// Rule `signed` or `number`, to the nearest binary64 value.
+    /// Rule `signed` or `number`, to the nearest binary64 value. One past the largest is reported.
     pub(super) fn literal(
         &mut self,
         digits: &Pair<'_>,
@@ -74,6 +75,11 @@ impl Builder<'_> {
         unit: Option<UnitText>,
     ) -> Option<Literal> {
         let value = digits.as_str().parse::<f64>().ok()?;
-        Some(Literal { span, value, digits: self.span(digits), unit })
+        let digits = self.span(digits);
+        if value.is_infinite() {
+            self.report(|| number_out_of_range::found(digits));
+            return None;
+        }
+        Some(Literal { span, value, digits, unit })
     }
 }

@@ -2,6 +2,7 @@
 
 mod accepted;
 mod example;
+mod rejected;
 
 use super::{Parsed, parse};
 use crate::source::FileId;
