@@ -4,6 +4,7 @@
 
 mod fact;
 mod formula;
+mod json;
 mod mission;
 mod phase;
 mod vehicle;
@@ -11,6 +12,7 @@ mod world;
 
 pub use fact::{Fact, FactId, Origin, Place, Value};
 pub use formula::{Edge, Formula, Function, Operator, Quantity, QuantityKind, Reading};
+pub use json::{json, schema};
 pub use mission::{
     Aim, Demand, Epoch, FORMAT, Figure, Headline, Knob, Mission, Model, Objective, Requirement, Start,
 };
