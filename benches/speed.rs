@@ -17,7 +17,8 @@ impl Reader for Folder {
     fn read(&self, path: &str) -> Result<Vec<u8>, ReadError> {
         match path {
             "generated.wright" => Ok(self.generated.clone().into_bytes()),
-            _ => std::fs::read(PathBuf::from(env!("CARGO_MANIFEST_DIR")).join(path)).map_err(|_| ReadError::Missing),
+            _ => std::fs::read(PathBuf::from(env!("CARGO_MANIFEST_DIR")).join(path))
+                .map_err(|_| ReadError::Missing),
         }
     }
 }

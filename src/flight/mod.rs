@@ -1,5 +1,6 @@
 //! The checked model flown: numeric plan, integration, events, ledger and what was asked of it.
 
+mod integrate;
 mod result;
 
 pub use result::{

@@ -44,7 +44,9 @@ fn every_folder_knows_only_what_stands_before_it() {
             for name in names {
                 let used: String =
                     name.trim().chars().take_while(|c| c.is_ascii_alphanumeric() || *c == '_').collect();
-                if used != folder && LAYERS.iter().any(|(layer, _)| *layer == used) && !allowed.contains(&used.as_str())
+                if used != folder
+                    && LAYERS.iter().any(|(layer, _)| *layer == used)
+                    && !allowed.contains(&used.as_str())
                 {
                     faults.push(format!("src/{relative} knows `{used}`"));
                 }
@@ -77,5 +79,9 @@ fn files_stay_small_enough_for_one_concept() {
     lengths.sort();
     let (longest, name) = lengths.last().unwrap();
     assert!(*longest <= 450, "{name} has {longest} lines");
-    assert!(lengths[lengths.len() / 2].0 <= 150, "the median file has {} lines", lengths[lengths.len() / 2].0);
+    assert!(
+        lengths[lengths.len() / 2].0 <= 150,
+        "the median file has {} lines",
+        lengths[lengths.len() / 2].0
+    );
 }

@@ -16,7 +16,8 @@ fn said(run: &Run) -> Vec<(u64, String, String)> {
     run.err
         .lines()
         .map(|line| {
-            let value: serde_json::Value = serde_json::from_str(line).unwrap_or_else(|_| panic!("not JSON: {line}"));
+            let value: serde_json::Value =
+                serde_json::from_str(line).unwrap_or_else(|_| panic!("not JSON: {line}"));
             let text = |key: &str| value[key].as_str().unwrap().to_owned();
             (value["line"].as_u64().unwrap(), text("code"), text("message"))
         })

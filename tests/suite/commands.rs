@@ -23,7 +23,12 @@ fn exit_statuses_are_those_of_the_charter() {
 fn the_gravest_of_several_files_counts_and_all_are_told() {
     let run = stagewright(
         &root(),
-        &["check", "tests/cases/unknown-name.wright", "missions/lantern.wright", "tests/cases/unclosed-block.wright"],
+        &[
+            "check",
+            "tests/cases/unknown-name.wright",
+            "missions/lantern.wright",
+            "tests/cases/unclosed-block.wright",
+        ],
     );
     assert_eq!(run.status, 3);
     assert!(run.err.contains("unknown-name") && run.err.contains("unclosed-block"), "{}", run.err);
@@ -66,7 +71,8 @@ fn same_bytes_from_any_folder() {
     let folder = tempfile::tempdir().unwrap();
     let (first, second) = (folder.path().join("a"), folder.path().join("b"));
     let source = root().join("missions/lantern.wright");
-    let from_root = stagewright(&root(), &["report", "--out", first.to_str().unwrap(), "missions/lantern.wright"]);
+    let from_root =
+        stagewright(&root(), &["report", "--out", first.to_str().unwrap(), "missions/lantern.wright"]);
     let from_afar =
         stagewright(folder.path(), &["report", "--out", second.to_str().unwrap(), source.to_str().unwrap()]);
     assert_eq!((from_root.status, from_afar.status), (0, 0), "{}{}", from_root.err, from_afar.err);

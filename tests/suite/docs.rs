@@ -55,7 +55,9 @@ fn keep(document: &str, mark: &str, wanted: &str) {
     if std::env::var_os("STAGEWRIGHT_BLESS").is_some() {
         fs::write(&path, format!("{before}{open}{wanted}<!-- end -->{after}")).unwrap();
     } else {
-        panic!("{document}: the part `{mark}` is not what the program says; see DEVELOPERS.md on how to write it anew");
+        panic!(
+            "{document}: the part `{mark}` is not what the program says; see DEVELOPERS.md on how to write it anew"
+        );
     }
 }
 
@@ -74,7 +76,8 @@ fn the_generated_parts_of_the_manual_are_current() {
     }
     keep("docs/manual.md", "units", &units);
 
-    let mut quantities = String::from("| quantity | dimension | shown in | where | meaning |\n|---|---|---|---|---|\n");
+    let mut quantities =
+        String::from("| quantity | dimension | shown in | where | meaning |\n|---|---|---|---|---|\n");
     for quantity in Quantity::ALL {
         let kind = match quantity.kind() {
             QuantityKind::Any => "everywhere",

@@ -81,7 +81,12 @@ fn the_ledger_closes_and_its_columns_stand_at_a_tighter_tolerance() {
                     assert!((a - b).abs() < 1e-5, "{file}, row {row}, {name}: {a} against {b}");
                 }
                 assert!(a.closure().abs() < 1e-6, "{file}, row {row}: closure {}", a.closure());
-                assert!((a.paid - a.ideal).abs() < 1e-6, "{file}, row {row}: paid {} ideal {}", a.paid, a.ideal);
+                assert!(
+                    (a.paid - a.ideal).abs() < 1e-6,
+                    "{file}, row {row}: paid {} ideal {}",
+                    a.paid,
+                    a.ideal
+                );
             }
             assert!(usual.ledger.total.closure().abs() < 1e-6, "{file}: {}", usual.ledger.total.closure());
         }
@@ -104,7 +109,8 @@ fn launches_read_like_a_real_programme() {
         let mission = &model.missions[0];
         let flight = flown(&model, mission, 1e-9);
         assert!(mission.demands.len() >= 3, "{file}");
-        let near = flight.demands.iter().any(|found| found.met && found.margin.abs() <= 0.05 * found.limit.abs());
+        let near =
+            flight.demands.iter().any(|found| found.met && found.margin.abs() <= 0.05 * found.limit.abs());
         assert!(near, "{file}: no demand is within 5 % of its limit");
         assert!(flight.peaks.iter().any(|peak| peak.corner), "{file}: no peak stands at a corner");
     }
