@@ -3,8 +3,8 @@
 use super::AirState;
 use crate::math::Scalar;
 
-/// Density and pressure fall as exp(−altitude/scale height); speed of sound and temperature are the
-/// same everywhere.
+/// Density and pressure fall as exp(−altitude/scale height); the speed of sound is the same
+/// everywhere.
 #[derive(Clone, Copy, Debug)]
 pub struct Exponential<S> {
     /// kg/m³ at altitude zero.
@@ -18,7 +18,7 @@ pub struct Exponential<S> {
 }
 
 impl<S: Scalar> Exponential<S> {
-    /// The air at an altitude in m. The temperature is not stated by such a model and is given as zero.
+    /// The air at an altitude in m.
     #[inline]
     pub fn at(&self, altitude: S) -> AirState<S> {
         let thinned = (-(altitude / self.scale_height)).exp();
@@ -26,7 +26,6 @@ impl<S: Scalar> Exponential<S> {
             density: self.density * thinned,
             pressure: self.pressure * thinned,
             sound_speed: self.sound_speed,
-            temperature: S::zero(),
         }
     }
 }

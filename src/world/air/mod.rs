@@ -16,8 +16,6 @@ pub struct AirState<S> {
     pub pressure: S,
     /// m/s
     pub sound_speed: S,
-    /// K
-    pub temperature: S,
 }
 
 /// A model of the air.
@@ -39,6 +37,14 @@ impl<S: Scalar> Air<S> {
             Air::None => None,
             Air::Standard1976 => standard_1976::at(altitude),
             Air::Exponential(exponential) => Some(exponential.at(altitude)),
+        }
+    }
+
+    /// Kinetic temperature in K at a geodetic altitude in m, from the model that states one.
+    pub fn temperature(&self, altitude: S) -> Option<S> {
+        match self {
+            Air::Standard1976 => standard_1976::temperature(altitude),
+            Air::None | Air::Exponential(_) => None,
         }
     }
 
