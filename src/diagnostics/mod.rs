@@ -2,5 +2,7 @@
 
 pub mod codes;
 mod diagnostic;
+mod nearest;
 
 pub use diagnostic::{Code, Diagnostic, Label, Severity};
+pub use nearest::nearest;

@@ -4,11 +4,11 @@ use pest::Parser;
 use pest::error::{ErrorVariant, InputLocation};
 
 use super::rules::{Grammar, Rule};
-use super::words;
-use crate::diagnostics::Diagnostic;
+use super::{token, words};
 use crate::diagnostics::codes::{
     number_without_digits, operator_needs_blanks, unclosed_text, unexpected_text,
 };
+use crate::diagnostics::{Diagnostic, nearest};
 use crate::source::{FileId, Span};
 
 /// Where a piece of text stops to fit a rule.
@@ -75,7 +75,7 @@ impl<'t> Stop<'t> {
     /// What stands at the place: a word, a number, a quoted text or a mark; nothing at the end of a
     /// line.
     fn token(&self) -> &'t str {
-        words::token(self.rest())
+        token::token(self.rest())
     }
 
     fn span(&self) -> Span {
@@ -87,7 +87,7 @@ impl<'t> Stop<'t> {
         match token.chars().next() {
             None => "the end of the line".to_owned(),
             Some('"') => "a quoted text".to_owned(),
-            Some(_) if words::MARKS.contains(&token) => format!("`{token}`"),
+            Some(_) if token::MARKS.contains(&token) => format!("`{token}`"),
             Some(first) if token.len() == first.len_utf8() => words::of_character(first),
             Some(_) if token.len() > 40 => "a long word".to_owned(),
             Some(_) => format!("`{token}`"),
@@ -142,15 +142,15 @@ impl<'t> Stop<'t> {
         let token = self.token();
         let named: Vec<String> = self.expected.iter().map(|rule| words::of_rule(*rule)).collect();
         let keywords = named.iter().flat_map(|name| name.split('`').skip(1).step_by(2));
-        if let Some(near) = words::nearest(token, keywords.flat_map(|keyword| keyword.split(' '))) {
+        if let Some(near) = nearest(token, keywords.flat_map(|keyword| keyword.split(' '))) {
             return Some(format!("did you mean `{near}`?"));
         }
         let piece = Span::new(self.file, self.start, self.at);
-        let word = words::first(self.read, piece)?;
+        let word = token::first(self.read, piece)?;
         if words::STATEMENTS.contains(&word) || words::KINDS.contains(&word) {
             return None;
         }
-        let near = words::nearest(word, words::STATEMENTS.iter().copied())?;
+        let near = nearest(word, words::STATEMENTS.iter().copied())?;
         Some(format!("did you mean `{near}` in place of `{word}`?"))
     }
 
@@ -161,7 +161,7 @@ impl<'t> Stop<'t> {
 
     fn unclosed_text(&self) -> Option<Diagnostic> {
         let rest = self.rest();
-        (rest.starts_with('"') && words::closing_quote(rest).is_none()).then(|| {
+        (rest.starts_with('"') && token::closing_quote(rest).is_none()).then(|| {
             let line = rest.split('\n').next().unwrap_or("").trim_end();
             unclosed_text::found(Span::new(self.file, self.at, self.at + line.len()))
         })

@@ -6,11 +6,13 @@ mod lines;
 mod look;
 mod parse;
 mod rules;
+mod token;
 mod tree;
 mod words;
 
 pub use decode::{NotUtf8, decode};
 pub use parse::{Parsed, parse};
+pub use rules::is_keyword;
 pub use tree::*;
 
 #[cfg(test)]

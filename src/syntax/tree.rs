@@ -257,6 +257,7 @@ pub struct Burn {
 
 /// The attitude law of a phase.
 #[derive(Clone, Debug)]
+#[allow(clippy::large_enum_variant, reason = "a phase has one, and a box would make every use longer")]
 pub enum Steer {
     Upright,
     /// `into airflow`

@@ -1,7 +1,6 @@
 //! The rules of the grammar and the characters of a text in human words.
 
 use super::rules::Rule;
-use crate::source::Span;
 
 /// The words that start a fact or a definition, for finding the one that was meant.
 pub(super) const STATEMENTS: &[&str] = &[
@@ -150,93 +149,4 @@ pub(super) fn of_character(character: char) -> String {
         _ if character.is_ascii() => format!("`{character}`"),
         _ => format!("`{character}` (U+{:04X})", u32::from(character)),
     }
-}
-
-/// The candidate that is at most two edits away from a word (one for short words, none for
-/// those of three letters and less), if any.
-pub(super) fn nearest<'c>(word: &str, candidates: impl Iterator<Item = &'c str>) -> Option<&'c str> {
-    if word.len() < 4 || !is_name(word) {
-        return None;
-    }
-    let reach = if word.len() < 6 { 1 } else { 2 };
-    let near = candidates.map(|candidate| (distance(word, candidate), candidate));
-    near.filter(|(distance, _)| (1..=reach).contains(distance)).min().map(|(_, candidate)| candidate)
-}
-
-/// The number of insertions, deletions, replacements and swaps of neighbours between two words
-/// (optimal string alignment). Long words are never near.
-fn distance(left: &str, right: &str) -> usize {
-    if left.len() > 32 || left.len().abs_diff(right.len()) > 2 {
-        return usize::MAX;
-    }
-    let (left, right) = (left.as_bytes(), right.as_bytes());
-    let mut before: Vec<usize> = Vec::new();
-    let mut row: Vec<usize> = (0..=right.len()).collect();
-    let mut previous = None;
-    for (i, a) in left.iter().enumerate() {
-        let mut next = vec![i + 1];
-        let mut last = i + 1;
-        for (j, b) in right.iter().enumerate() {
-            let at = |row: &[usize], j: usize| row.get(j).copied().unwrap_or(usize::MAX - 1);
-            last = (at(&row, j) + usize::from(a != b)).min(at(&row, j + 1) + 1).min(last + 1);
-            let swapped = j.checked_sub(1).is_some_and(|k| right.get(k) == Some(a)) && previous == Some(b);
-            if swapped {
-                last = last.min(at(&before, j - 1) + 1);
-            }
-            next.push(last);
-        }
-        before = std::mem::replace(&mut row, next);
-        previous = Some(a);
-    }
-    row.last().copied().unwrap_or(usize::MAX)
-}
-
-/// The word that a piece of a text starts with.
-pub(super) fn first(read: &str, piece: Span) -> Option<&str> {
-    let text = read.get(piece.range())?;
-    let end = text.find(|next: char| !is_name_character(next)).unwrap_or(text.len());
-    text.get(..end).filter(|word| is_name(word))
-}
-
-/// Whether a text is a name in the sense of the grammar.
-pub(super) fn is_name(text: &str) -> bool {
-    text.chars().all(is_name_character) && text.starts_with(|first: char| !first.is_ascii_digit())
-}
-
-fn is_name_character(character: char) -> bool {
-    character.is_ascii_alphanumeric() || character == '_'
-}
-
-/// The marks of more than one character.
-pub(super) const MARKS: &[&str] = &["->", ">=", "<=", ".."];
-
-/// What a rest of a text starts with: a word, a number, a quoted text or a mark; nothing if the line
-/// ends here.
-pub(super) fn token(rest: &str) -> &str {
-    let is_part = |character: char| character.is_alphanumeric() || character == '_';
-    let next = rest.trim_start_matches(' ');
-    let len = match rest.chars().next() {
-        _ if next.is_empty() || next.starts_with('\n') => 0,
-        None => 0,
-        Some('"') => closing_quote(rest).unwrap_or(1),
-        Some(first) if is_part(first) => rest.find(|next| !is_part(next)).unwrap_or(rest.len()),
-        Some(first) => {
-            let mark = MARKS.iter().find(|mark| rest.starts_with(**mark));
-            mark.map_or(first.len_utf8(), |mark| mark.len())
-        }
-    };
-    rest.get(..len).unwrap_or("")
-}
-
-/// The length of the quoted text that a rest starts with, if it is closed on its line.
-pub(super) fn closing_quote(rest: &str) -> Option<usize> {
-    let mut escaped = false;
-    for (at, next) in rest.char_indices().skip(1) {
-        match next {
-            '\n' => return None,
-            '"' if !escaped => return Some(at + 1),
-            _ => escaped = next == '\\' && !escaped,
-        }
-    }
-    None
 }

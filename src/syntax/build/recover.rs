@@ -5,9 +5,10 @@ use super::block::{Head, block_kind};
 use crate::diagnostics::codes::{
     misplaced_fact, missing_line_break, stray_brace, unclosed_block, unexpected_text,
 };
+use crate::diagnostics::nearest;
 use crate::source::Span;
 use crate::syntax::rules::Rule;
-use crate::syntax::{Name, look, words};
+use crate::syntax::{Name, look, token, words};
 
 impl Builder<'_> {
     /// A `}` outside every block. After misplaced facts it is a consequence of the same mistake, a
@@ -20,7 +21,7 @@ impl Builder<'_> {
 
     pub(super) fn missing_break(&mut self, at: Span) {
         let rest = self.read.get(at.range().start..).unwrap_or("");
-        let end = at.range().start + words::token(rest).len();
+        let end = at.range().start + token::token(rest).len();
         self.report(|| missing_line_break::found(Span::new(at.file, at.range().start, end)));
     }
 
@@ -31,18 +32,14 @@ impl Builder<'_> {
     /// Of facts outside every block that follow each other only the first is told.
     pub(super) fn broken_item(&mut self, span: Span) {
         let (file, read) = (self.file, self.read);
-        let starts_definition = words::first(read, span)
-            .is_some_and(|word| matches!(word, "bring" | "unit" | "given") || words::KINDS.contains(&word));
-        let entry = match words::first(read, span) {
-            Some(word) if words::KINDS.contains(&word) => Rule::lone_head,
-            _ if starts_definition => Rule::lone_item,
-            _ => Rule::lone_fact,
-        };
+        let first = token::first(read, span).unwrap_or("");
+        let entry = if words::KINDS.contains(&first) { Rule::lone_head } else { Rule::lone_item };
         let was_misplaced = std::mem::take(&mut self.misplaced);
+        let fact = || {
+            look::stop(file, read, span, Rule::lone_fact).is_none_or(|stop| stop.at() > span.range().start)
+        };
         match look::stop(file, read, span, entry) {
-            Some(stop) if starts_definition || stop.at() == span.range().start => {
-                self.report(|| stop.diagnostic())
-            }
+            Some(stop) if stop.at() > span.range().start || !fact() => self.report(|| stop.diagnostic()),
             _ => {
                 self.misplaced = true;
                 if !was_misplaced {
@@ -54,7 +51,7 @@ impl Builder<'_> {
 
     pub(super) fn broken_line(&mut self, span: Span) {
         let (file, read) = (self.file, self.read);
-        let entry = match words::first(read, span) {
+        let entry = match token::first(read, span) {
             Some(word) if words::KINDS.contains(&word) => Rule::lone_head,
             Some("bring" | "unit") => Rule::lone_item,
             _ => Rule::lone_fact,
@@ -69,11 +66,10 @@ impl Builder<'_> {
     pub(super) fn broken_head(&mut self, head: Span) -> Option<Head> {
         let (file, read) = (self.file, self.read);
         let text = read.get(head.range())?;
-        let mut heads = text.split([' ', '{']).filter(|word| !word.is_empty());
+        let mut heads = text.split([' ', '\n', '{']).filter(|word| !word.is_empty());
         let (first, second) = (heads.next().unwrap_or(""), heads.next());
-        let meant =
-            block_kind(first).map(|_| first).or_else(|| words::nearest(first, words::KINDS.iter().copied()));
-        let shaped = words::is_name(first) && second.is_none_or(words::is_name) && heads.next().is_none();
+        let meant = block_kind(first).map(|_| first).or_else(|| nearest(first, words::KINDS.iter().copied()));
+        let shaped = token::is_name(first) && second.is_none_or(token::is_name) && heads.next().is_none();
         self.report(|| match look::stop(file, read, head, Rule::lone_head) {
             Some(stop) if meant.is_some() || shaped => stop.diagnostic(),
             _ => {
@@ -82,7 +78,7 @@ impl Builder<'_> {
                     .help("a block starts with its kind and its name, such as `stage Bracken {`")
             }
         });
-        let name = second.filter(|name| words::is_name(name))?;
+        let name = second.filter(|name| token::is_name(name))?;
         let after = text.find(first)? + first.len();
         let at = head.range().start + after + text.get(after..)?.find(name)?;
         let span = Span::new(file, at, at + name.len());

@@ -1,8 +1,15 @@
 //! Tests of the parser.
 
 mod accepted;
+mod codes;
 mod example;
+mod expressions;
+mod recovery;
 mod rejected;
+mod spans;
+mod text;
+mod totality;
+mod vocabulary;
 
 use super::{Parsed, parse};
 use crate::source::FileId;
