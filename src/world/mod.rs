@@ -7,6 +7,8 @@ mod geodesy;
 mod gravity;
 mod orbit;
 mod root;
+#[cfg(test)]
+mod slope;
 
 pub use air::{Air, AirState, Exponential};
 pub use geodesy::{

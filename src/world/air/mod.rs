@@ -7,6 +7,9 @@ pub use exponential::Exponential;
 
 use crate::math::Scalar;
 
+#[cfg(test)]
+mod tests;
+
 /// The air at one altitude.
 #[derive(Clone, Copy, Debug, PartialEq)]
 pub struct AirState<S> {

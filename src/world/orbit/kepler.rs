@@ -51,8 +51,8 @@ fn descend(start: f64, function: impl Fn(f64) -> (f64, f64)) -> f64 {
     for _ in 0..STEPS {
         let (value, slope) = function(at);
         let next = at - value / slope;
-        // Rounding alone can make a step that does not descend.
-        if !(next < at) {
+        // At the root rounding alone decides the step, so that it may not descend.
+        if next >= at || next.is_nan() {
             break;
         }
         at = next;

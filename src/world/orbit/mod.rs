@@ -17,6 +17,8 @@ use std::f64::consts::TAU;
 use crate::math::Scalar;
 
 #[cfg(test)]
+mod oblateness_tests;
+#[cfg(test)]
 mod solar_time_tests;
 #[cfg(test)]
 mod tests;

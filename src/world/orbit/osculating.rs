@@ -117,13 +117,13 @@ impl<S: Scalar> Orbit<S> {
 
     /// rad, 0 to 2π.
     pub fn argument_of_perigee(&self) -> S {
-        if self.is_circular() { S::zero() } else { self.from_node(self.eccentricity) }
+        if self.is_circular() { S::zero() } else { self.angle_past_node(self.eccentricity) }
     }
 
     /// rad, 0 to 2π.
     pub fn true_anomaly(&self) -> S {
         if self.is_circular() {
-            return self.from_node(self.position);
+            return self.angle_past_node(self.position);
         }
         // e·r·sin ν = h·(r·v)/μ and e·r·cos ν = e·r.
         let along = self.eccentricity.dot(self.position);
@@ -167,7 +167,7 @@ impl<S: Scalar> Orbit<S> {
     }
 
     /// Angle from the node to a direction in the orbit's plane, in the sense of the motion.
-    fn from_node(&self, direction: Vector<S>) -> S {
+    fn angle_past_node(&self, direction: Vector<S>) -> S {
         let node = self.node_direction();
         let normal = self.momentum.unit().unwrap_or_else(|| Vector::new(S::zero(), S::zero(), S::one()));
         turned(direction.dot(normal.cross(node)).atan2(direction.dot(node)))
