@@ -1,22 +1,103 @@
 //! What a compilation knows while it goes on.
 
-use super::names::Definition;
-use super::{BlockId, Inherited, ScopeId};
+use std::collections::{BTreeMap, BTreeSet, HashMap};
+
+use super::blocks::Results;
+use super::facts::{Owned, Record, Use};
+use super::given::State;
+use super::lines::Inherited;
+use super::names::{Definition, GivenDefinition, GivenId, Scope};
+use super::stage::StageFacts;
+use super::{BlockId, ScopeId};
 use crate::diagnostics::Diagnostic;
-use crate::model::{Engine, Fact, Vehicle, World};
-use crate::source::{Sources, Span};
-use crate::syntax::{BlockKind, Name, Statement};
+use crate::model::{Curve, Engine, Fact, FactId, Value, Vehicle, World};
+use crate::quantity::UnitTable;
+use crate::source::{FileId, Sources, Span};
+use crate::syntax::Expr;
 
 /// The sources and trees of a compilation, the names in them, and what has come of them so far.
 pub(crate) struct Context<'a> {
     pub(super) sources: &'a Sources,
-    pub(super) definitions: Vec<Definition<'a>>,
-    /// Every number met so far; [`crate::model::FactId`] is an index into it.
-    pub(super) facts: Vec<Fact>,
+    pub(super) links: &'a BTreeMap<Span, FileId>,
     pub(super) diagnostics: Vec<Diagnostic>,
+    /// Work that is left for the search of near names.
+    pub(super) nearest_budget: usize,
+    pub(super) depth: u32,
+
+    pub(super) scopes: Vec<Scope<'a>>,
+    pub(super) definitions: Vec<Definition<'a>>,
+    pub(super) givens: Vec<GivenDefinition<'a>>,
+    pub(super) mission_givens: HashMap<(BlockId, &'a str), GivenId>,
+    pub(super) mission_scopes: HashMap<(BlockId, ScopeId), ScopeId>,
+    pub(super) lines: HashMap<BlockId, Vec<Inherited<'a>>>,
+    /// By the scope of a file.
+    pub(super) units: Vec<UnitTable>,
+
+    /// Every number met so far; [`FactId`] is an index into it.
+    pub(super) facts: Vec<Fact>,
+    /// One for each fact.
+    pub(super) records: Vec<Record>,
+    /// By the block that states it, and its path.
+    pub(super) addresses: HashMap<(BlockId, String), FactId>,
+    /// What the expressions being worked out have named, innermost last.
+    pub(super) naming: Vec<Vec<Use>>,
+    pub(super) given_values: HashMap<GivenId, State<Value>>,
+    /// The expressions of a block by their addresses within it.
+    pub(super) stated: HashMap<BlockId, HashMap<String, (&'a Expr, ScopeId)>>,
+    /// Those that are being worked out.
+    pub(super) settings: BTreeSet<(BlockId, String)>,
+    /// The blocks that are being checked, innermost last.
+    pub(super) subjects: Vec<BlockId>,
+    pub(super) owned: HashMap<BlockId, Owned>,
+
+    pub(super) worlds: Results<World>,
+    pub(super) engines: Results<Engine>,
+    pub(super) curves: Results<Curve>,
+    pub(super) stages: Results<StageFacts>,
+    pub(super) vehicles: Results<Vehicle>,
+    /// Engines that say nothing about sea level.
+    pub(super) vacuum_only: BTreeSet<BlockId>,
+    /// Vehicles that say nothing about drag.
+    pub(super) without_drag: BTreeSet<BlockId>,
 }
 
+/// Names looked at, all in all, in the search of near ones.
+const NEAREST_BUDGET: usize = 200_000;
+
 impl<'a> Context<'a> {
+    pub(super) fn new(sources: &'a Sources, links: &'a BTreeMap<Span, FileId>) -> Self {
+        Context {
+            sources,
+            links,
+            nearest_budget: NEAREST_BUDGET,
+            diagnostics: Default::default(),
+            depth: Default::default(),
+            scopes: Default::default(),
+            definitions: Default::default(),
+            givens: Default::default(),
+            mission_givens: Default::default(),
+            mission_scopes: Default::default(),
+            lines: Default::default(),
+            units: Default::default(),
+            facts: Default::default(),
+            records: Default::default(),
+            addresses: Default::default(),
+            naming: Default::default(),
+            given_values: Default::default(),
+            stated: Default::default(),
+            settings: Default::default(),
+            subjects: Default::default(),
+            owned: Default::default(),
+            worlds: Default::default(),
+            engines: Default::default(),
+            curves: Default::default(),
+            stages: Default::default(),
+            vehicles: Default::default(),
+            vacuum_only: Default::default(),
+            without_drag: Default::default(),
+        }
+    }
+
     pub(crate) fn report(&mut self, diagnostic: Diagnostic) {
         self.diagnostics.push(diagnostic);
     }
@@ -24,70 +105,5 @@ impl<'a> Context<'a> {
     /// The text of a span.
     pub(crate) fn text(&self, span: Span) -> &'a str {
         self.sources.text(span)
-    }
-
-    /// The block of an id that this compilation gave out, and the scope of its lines. For a mission
-    /// that scope has the mission's own givens on top of those of its file.
-    pub(crate) fn definition(&self, block: BlockId) -> Definition<'a> {
-        // invariant: only `names` makes a BlockId, as an index into this list.
-        self.definitions[block.0 as usize]
-    }
-
-    /// The block of a kind that a name stands for; reports a name that is unknown or of another kind.
-    pub(crate) fn find_block(&mut self, scope: ScopeId, kind: BlockKind, name: &Name) -> Option<BlockId> {
-        let _ = (scope, kind, name);
-        None
-    }
-
-    /// The lines of a block, those that it inherits through `like` included; of two lines that state
-    /// the same fact the block's own stands, in the place of the other. A fact given twice within
-    /// one block is reported, and the first stands. Broken lines are left out.
-    pub(crate) fn lines(&mut self, block: BlockId) -> Vec<Inherited<'a>> {
-        let _ = block;
-        Vec::new()
-    }
-
-    /// The checked world, vehicle or engine, worked out on first use; None where it has errors,
-    /// which have been reported.
-    pub(crate) fn world(&mut self, block: BlockId) -> Option<World> {
-        let _ = block;
-        None
-    }
-
-    pub(crate) fn vehicle(&mut self, block: BlockId) -> Option<Vehicle> {
-        let _ = block;
-        None
-    }
-
-    pub(crate) fn engine(&mut self, block: BlockId) -> Option<Engine> {
-        let _ = block;
-        None
-    }
-
-    /// For a mission in a world with air: reports each engine of the vehicle that says nothing
-    /// about sea level, and a vehicle that says nothing about drag. `flies` is the place of the
-    /// mission's `flies` fact.
-    pub(crate) fn check_in_air(&mut self, vehicle: BlockId, world: BlockId, flies: Span) {
-        let _ = (vehicle, world, flies);
-    }
-
-    /// Facts recorded and blocks looked up from here to [`Context::leave`] belong to this block
-    /// (a mission); see [`Context::facts_of`].
-    pub(crate) fn enter(&mut self, block: BlockId) {
-        let _ = block;
-    }
-
-    pub(crate) fn leave(&mut self) {}
-
-    /// Reports a statement that has no place in a block of this kind, or a key that no fact of it
-    /// has, with the nearest of `keys`.
-    pub(crate) fn misplaced(&mut self, kind: BlockKind, span: Span, statement: &Statement, keys: &[&str]) {
-        let _ = (kind, span, statement, keys);
-    }
-
-    /// Reports a fact that a block lacks: `what` it is ("the payload") and how one writes it
-    /// ("payload  132 kg").
-    pub(crate) fn missing(&mut self, block: BlockId, what: &str, example: &str) {
-        let _ = (block, what, example);
     }
 }

@@ -3,3 +3,5 @@
 mod dimension;
 
 pub use dimension::Dimension;
+mod provisional;
+pub use provisional::*;

@@ -1,0 +1,27 @@
+//! The examples of `explain`: each brings its code up, and its mend does not.
+
+use super::{codes, compile_text};
+use crate::diagnostics::codes::ALL;
+
+/// Their examples are made by the tests of the parser: too long, or not text.
+const ELSEWHERE: &[&str] = &["file-too-large", "not-utf8", "too-many-facts"];
+
+#[test]
+fn each_example_brings_up_its_code_and_its_mend_brings_up_none() {
+    let mut faults = Vec::new();
+    for code in ALL.iter().filter(|code| !ELSEWHERE.contains(&code.name)) {
+        let (wrong, mended) = (compile_text(code.wrong), compile_text(code.mended));
+        if !codes(&wrong).contains(&code.name) {
+            faults.push(format!(
+                "{}: found {:?}",
+                code.name,
+                wrong.diagnostics.iter().map(|d| (d.code.name, &d.message)).collect::<Vec<_>>()
+            ));
+        }
+        if !mended.diagnostics.is_empty() {
+            let texts: Vec<_> = mended.diagnostics.iter().map(|one| (one.code.name, &one.message)).collect();
+            faults.push(format!("{} mended: found {texts:?}", code.name));
+        }
+    }
+    assert!(faults.is_empty(), "{}", faults.join("\n"));
+}
