@@ -8,8 +8,8 @@ use crate::world::slope::{Slope, assert_slope};
 
 const EARTH: Ellipsoid<f64> = Ellipsoid { equatorial_radius: 6378137.0, flattening: 1.0 / 298.257223563 };
 const SPHERE: Ellipsoid<f64> = Ellipsoid { equatorial_radius: 1737400.0, flattening: 0.0 };
-/// Far flatter than any planet.
-const DISC: Ellipsoid<f64> = Ellipsoid { equatorial_radius: 6.0e7, flattening: 0.1 };
+/// As flat as Saturn.
+const FLAT: Ellipsoid<f64> = Ellipsoid { equatorial_radius: 6.0e7, flattening: 0.1 };
 
 fn at(latitude: f64, longitude: f64, altitude: f64) -> Geodetic<f64> {
     Geodetic { latitude: latitude.to_radians(), longitude: longitude.to_radians(), altitude }
@@ -44,7 +44,8 @@ fn cartesian_to_geodetic() {
 
 #[test]
 fn there_and_back() {
-    for ellipsoid in [EARTH, SPHERE, DISC] {
+    // Latitudes in rad: a unit or two in the last place, but for what two steps leave of a great flattening.
+    for (ellipsoid, angle) in [(EARTH, 4e-16), (SPHERE, 4e-16), (FLAT, 1e-11)] {
         for altitude in [-10_000.0, 0.0, 45.0, 400e3, 2000e3, 36_000e3] {
             for degrees in [-90.0, -89.999999, -60.0, -1e-7, 0.0, 1e-9, 28.5, 45.0, 71.3, 89.99, 90.0] {
                 let wanted = at(degrees, -115.2, altitude);
@@ -53,9 +54,9 @@ fn there_and_back() {
                 let scale = position.length();
                 // A few units in the last place of the distance from the centre.
                 assert!((found.altitude - altitude).abs() < 1e-15 * scale, "{degrees} {altitude}");
-                assert!((found.latitude - wanted.latitude).abs() < 1e-15, "{degrees} {altitude}");
+                assert!((found.latitude - wanted.latitude).abs() < angle, "{degrees} {altitude}");
                 let again = ellipsoid.position(found);
-                assert!((again - position).length() < 1e-15 * scale, "{degrees} {altitude}");
+                assert!((again - position).length() < (1e-15 + angle) * scale, "{degrees} {altitude}");
             }
         }
     }
