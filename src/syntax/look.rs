@@ -120,7 +120,13 @@ impl<'t> Stop<'t> {
         if let Some(instead) = first.and_then(words::instead_of) {
             return Some(format!("write {instead}"));
         }
+        if first.is_some_and(|first| first.is_alphabetic() && !first.is_ascii()) {
+            return Some("names are made of the letters a to z and A to Z, digits and `_`".to_owned());
+        }
         match token {
+            "" if self.expected.contains(&Rule::open) => {
+                return Some("the `{` of a block stands on the line of its name".to_owned());
+            }
             "<" | ">" => return Some(format!("write `{token}=`: the limit itself is always allowed")),
             "=" if before.ends_with('=') => return Some("write a single `=`".to_owned()),
             "(" if before.trim_end().ends_with(|last: char| last.is_ascii_alphanumeric()) => {

@@ -21,3 +21,10 @@ pub fn found(open: Span, end: Span) -> Diagnostic {
         .and(end, "a `}` is missing before this")
         .help("close the block with `}` on a line of its own")
 }
+
+/// `head` is the block whose brace is probably missing, `brace` the one that it took instead.
+pub fn found_within(head: Span, brace: Span) -> Diagnostic {
+    CODE.at(head, "this block is not closed", "opened here")
+        .and(brace, "closed by this, which is indented for the block around it")
+        .help("close the block with `}` on a line of its own")
+}

@@ -18,7 +18,7 @@ impl Builder<'_> {
         let was = parts.accept(Rule::was).and_then(|was| self.next_name(&mut Parts::of(was)));
         let open = parts.find(Rule::open)?;
         let lines = self.body(parts.any()?);
-        let end = self.block_end(&mut parts, self.span(&open)).unwrap_or(span.end);
+        let end = self.block_end(&mut parts, self.span(&open), &lines).unwrap_or(span.end);
         Some(Block { span: Span { end, ..span }, kind, name, like, was, lines })
     }
 
@@ -31,17 +31,17 @@ impl Builder<'_> {
         let known = self.broken_head(head);
         let mut lines = vec![Line { span: head, statement: Statement::Broken, because: None }];
         lines.append(&mut self.body(parts.any()?));
-        let end = self.block_end(&mut parts, head).unwrap_or(span.end);
+        let end = self.block_end(&mut parts, head, &lines).unwrap_or(span.end);
         let (kind, name) = known?;
         Some(Block { span: Span { end, ..span }, kind, name, like: None, was: None, lines })
     }
 
     /// The closing brace, or what stands in its place. Gives the end of the block.
-    fn block_end(&mut self, parts: &mut Parts<'_>, open: Span) -> Option<u32> {
+    fn block_end(&mut self, parts: &mut Parts<'_>, open: Span, lines: &[Line]) -> Option<u32> {
         let close = parts.any()?;
         let close_span = self.span(&close);
         if close.as_rule() == Rule::unclosed {
-            self.unclosed_block(open, close_span);
+            self.unclosed_block(open, close_span, lines);
             return None;
         }
         if let Some(missing) = parts.accept(Rule::missing_break) {

@@ -8,7 +8,7 @@ use crate::diagnostics::codes::{
 use crate::diagnostics::nearest;
 use crate::source::Span;
 use crate::syntax::rules::Rule;
-use crate::syntax::{Name, look, token, words};
+use crate::syntax::{Block, Line, Name, Statement, look, token, words};
 
 impl Builder<'_> {
     /// A `}` outside every block. After misplaced facts it is a consequence of the same mistake, a
@@ -25,8 +25,33 @@ impl Builder<'_> {
         self.report(|| missing_line_break::found(Span::new(at.file, at.range().start, end)));
     }
 
-    pub(super) fn unclosed_block(&mut self, open: Span, end: Span) {
-        self.report(|| unclosed_block::found(open, end));
+    /// A block without its `}`. The brace that is missing is more likely that of a block within,
+    /// which then took the brace of this one: the indentation tells.
+    pub(super) fn unclosed_block(&mut self, open: Span, end: Span, lines: &[Line]) {
+        let taken = lines.iter().find_map(|line| match &line.statement {
+            Statement::Block(inner) => self.outdented_brace(inner).map(|brace| (inner, brace)),
+            _ => None,
+        });
+        self.report(|| match taken {
+            Some((inner, brace)) => {
+                unclosed_block::found_within(Span { end: inner.name.span.end, ..inner.span }, brace)
+            }
+            None => unclosed_block::found(open, end),
+        });
+    }
+
+    /// The closing brace of a block, if it stands alone on its line and further left than the block.
+    fn outdented_brace(&self, block: &Block) -> Option<Span> {
+        let brace = Span { start: block.span.end.checked_sub(1)?, ..block.span };
+        let is_outdented = self.indentation(brace)? < self.indentation(block.span)?;
+        (self.read.get(brace.range()) == Some("}") && is_outdented).then_some(brace)
+    }
+
+    /// How far from the start of its line a place is, if only blanks stand before it.
+    fn indentation(&self, place: Span) -> Option<usize> {
+        let before = self.read.get(..place.range().start)?;
+        let blanks = before.len() - before.trim_end_matches(' ').len();
+        before.trim_end_matches(' ').ends_with('\n').then_some(blanks)
     }
 
     /// Of facts outside every block that follow each other only the first is told.

@@ -82,6 +82,15 @@ fn a_block_that_is_not_closed_ends_before_the_next() {
 }
 
 #[test]
+fn a_block_that_took_the_brace_of_another_is_found_by_its_indentation() {
+    let text = "mission M {\n    phase A {\n        coast\n\n    payload 3 kg\n}\nstage B {\n}\n";
+    let parsed = read(text);
+    assert_eq!(codes(&parsed), ["unclosed-block"]);
+    assert_eq!(&text[parsed.diagnostics[0].span().range()], "phase A");
+    assert_eq!(parsed.tree.items.len(), 2);
+}
+
+#[test]
 fn a_block_closed_too_early_is_told_once() {
     let parsed =
         read("stage A {\n    dry 1 kg\n    }\n    propellant 2 kg\n    reserve 3 kg\n}\nstage B {\n}\n");

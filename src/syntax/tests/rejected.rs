@@ -5,6 +5,13 @@ use super::read;
 /// A fact within a block, and what is said about it: code, the text at its place, message, mend.
 const FACTS: &[(&str, &str, &str, &str, &str)] = &[
     ("given lean", "unexpected-text", "", "found the end of the line, expected a value", ""),
+    (
+        "given Höhe 3 m",
+        "unexpected-text",
+        "öhe",
+        "found `öhe`, expected a value",
+        "names are made of the letters a to z and A to Z, digits and `_`",
+    ),
     ("given 3 m", "unexpected-text", "3", "found `3`, expected a name", ""),
     (
         "given a-b",
@@ -104,7 +111,7 @@ const FACTS: &[(&str, &str, &str, &str, &str)] = &[
     ),
     ("given x max(1, )", "unexpected-text", ")", "found `)`, expected a value", ""),
     ("engines 7 Ember", "unexpected-text", "", "found the end of the line, expected `of`", ""),
-    ("engines of Ember", "unexpected-text", "Ember", "found `Ember`, expected `of`", ""),
+    ("engines of Ember", "unexpected-text", "of", "found `of`, expected a value", ""),
     (
         "stack Bracken Sorrel",
         "unexpected-text",

@@ -1,5 +1,7 @@
 //! Any text gives a tree with true places, in bounded time.
 
+#![allow(clippy::disallowed_methods, reason = "these tests measure time")]
+
 use std::time::{Duration, Instant};
 
 use proptest::prelude::*;
