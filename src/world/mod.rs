@@ -22,3 +22,6 @@ pub use orbit::{
 
 /// The worlds that ship with the compiler, in the language itself.
 pub const BUILTIN: &str = include_str!("builtin.wright");
+
+#[cfg(test)]
+mod builtin_tests;

@@ -1,7 +1,7 @@
 //! Zonal gravity against closed forms, numerical gradients and the normal gravity of WGS 84.
 
 use super::{Central, Gravity};
-use crate::math::{Scalar, Vector};
+use crate::math::Vector;
 use crate::world::slope::{Slope, assert_slope};
 use crate::world::{Ellipsoid, Geodetic, Spin};
 
@@ -98,5 +98,4 @@ fn derivatives_are_carried() {
         field.acceleration(along(Slope::from(4.0e6))).z()
     };
     assert_slope(by_j2, J2, 1e-4, 1e-9);
-    assert_eq!(Slope::variable(2.0).square().slope, 4.0);
 }
