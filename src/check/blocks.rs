@@ -81,7 +81,7 @@ impl<'a> Context<'a> {
         match statement {
             Statement::Broken => {}
             Statement::Setting(setting) => {
-                let near = self.nearest(&setting.key.text, keys.to_vec());
+                let near = self.nearest(&setting.key.text, |_| keys.to_vec());
                 self.report(unknown_fact::found(
                     setting.key.span,
                     &setting.key.text,

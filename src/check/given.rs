@@ -126,11 +126,14 @@ impl<'a> Context<'a> {
 
     /// Reports a name in an expression that nothing in reach defines.
     pub(crate) fn unknown_in_expression(&mut self, scope: ScopeId, name: &Name) {
-        let mut known: Vec<&'a str> = self.scope(self.scope(scope).file).names.keys().copied().collect();
-        if let Some(mission) = self.scope(scope).mission {
-            known.extend(self.givens_of(mission).into_iter().map(|(name, _)| name));
-        }
-        let near = self.nearest(&name.text, known);
+        let near = self.nearest(&name.text, |context| {
+            let mut known: Vec<&'a str> =
+                context.scope(context.scope(scope).file).names.keys().copied().collect();
+            if let Some(mission) = context.scope(scope).mission {
+                known.extend(context.givens_of(mission).into_iter().map(|(name, _)| name));
+            }
+            known
+        });
         let defined = near.and_then(|near| match self.find_given(scope, near) {
             Some(given) => self.givens.get(given.0 as usize).map(|given| given.given.name.span),
             None => self.named(scope, near).map(|named| named.here),
@@ -148,7 +151,9 @@ impl<'a> Context<'a> {
         if let Some((expr, scope)) = self.setting(block, rest) {
             return self.setting_value(block, &address, path.span, expr, scope);
         }
-        self.check_block(block);
+        if !self.check_block(block) {
+            return None;
+        }
         if let Some(fact) = self.fact_of(block, &address) {
             let fact = self.facts.get(fact.0 as usize)?;
             return Some(Typed { si: fact.si, dimension: fact.dimension });
@@ -237,15 +242,15 @@ impl<'a> Context<'a> {
         self.fact_of(block, &format!("{}.{}", self.definition(block).block.name.text, dotted(rest)))
     }
 
-    /// Checks a block of any kind that has facts.
-    pub(super) fn check_block(&mut self, block: BlockId) {
+    /// Checks a block of any kind that has facts; false where it has errors, which have been reported.
+    pub(super) fn check_block(&mut self, block: BlockId) -> bool {
         match self.definition(block).block.kind {
-            BlockKind::World => drop(self.world(block)),
-            BlockKind::Engine => drop(self.engine(block)),
-            BlockKind::Curve => drop(self.curve(block)),
-            BlockKind::Stage => drop(self.stage(block)),
-            BlockKind::Vehicle => drop(self.vehicle(block)),
-            BlockKind::Mission | BlockKind::Phase => {}
+            BlockKind::World => self.world(block).is_some(),
+            BlockKind::Engine => self.engine(block).is_some(),
+            BlockKind::Curve => self.curve(block).is_some(),
+            BlockKind::Stage => self.stage(block).is_some(),
+            BlockKind::Vehicle => self.vehicle(block).is_some(),
+            BlockKind::Mission | BlockKind::Phase => true,
         }
     }
 }

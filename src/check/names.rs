@@ -174,9 +174,9 @@ impl<'a> Context<'a> {
                 (Some(named), _) => self.define(scope, name, named.meaning, named.defined),
                 (None, Some(unit)) => self.scope_mut(scope).units.push(unit),
                 (None, None) => {
-                    let own = self.scope(target).names.keys().copied().collect();
-                    let near = self.nearest(&name.text, own).map(str::to_string);
-                    self.report(not_in_file::found(name.span, &name.text, shown, near.as_deref()));
+                    let near = self
+                        .nearest(&name.text, |context| context.scope(target).names.keys().copied().collect());
+                    self.report(not_in_file::found(name.span, &name.text, shown, near));
                     self.define(scope, name, Meaning::Broken, name.span);
                 }
             }
@@ -291,13 +291,14 @@ impl<'a> Context<'a> {
     }
 
     fn nearest_block(&mut self, scope: ScopeId, kind: BlockKind, name: &str) -> Option<BlockId> {
-        let names = &self.scope(self.scope(scope).file).names;
-        let of_kind = names.iter().filter_map(|(name, named)| match named.meaning {
-            Meaning::Block(block) if self.definition(block).block.kind == kind => Some(*name),
-            _ => None,
-        });
-        let of_kind = of_kind.collect();
-        let near = self.nearest(name, of_kind)?;
+        let near = self.nearest(name, |context| {
+            let names = &context.scope(context.scope(scope).file).names;
+            let of_kind = names.iter().filter(|(_, named)| match named.meaning {
+                Meaning::Block(block) => context.definition(block).block.kind == kind,
+                _ => false,
+            });
+            of_kind.map(|(name, _)| *name).collect()
+        })?;
         match self.named(scope, near)?.meaning {
             Meaning::Block(block) => Some(block),
             _ => None,
@@ -306,12 +307,16 @@ impl<'a> Context<'a> {
 
     /// The nearest of some names, if one is close. The work on unknown names is bounded: a source
     /// full of them soon gets no more advice.
-    pub(super) fn nearest<'n>(&mut self, name: &str, mut among: Vec<&'n str>) -> Option<&'n str> {
-        self.nearest_budget = self.nearest_budget.saturating_sub(among.len());
+    pub(super) fn nearest<'n>(
+        &mut self,
+        name: &str,
+        among: impl FnOnce(&mut Self) -> Vec<&'n str>,
+    ) -> Option<&'n str> {
         if self.nearest_budget == 0 {
             return None;
         }
-        among.sort_unstable();
+        let among = among(self);
+        self.nearest_budget = self.nearest_budget.saturating_sub(among.len());
         crate::diagnostics::nearest(name, among.into_iter())
     }
 }

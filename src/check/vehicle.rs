@@ -82,8 +82,8 @@ impl<'a> Context<'a> {
             let count = self.bounded(count, Bound::WholeFrom(1.0), what);
             let carrier = stack.iter().position(|name| name.text == beside.carrier.text);
             if carrier.is_none() {
-                let near =
-                    self.nearest(&beside.carrier.text, stack.iter().map(|name| name.text.as_str()).collect());
+                let near = self
+                    .nearest(&beside.carrier.text, |_| stack.iter().map(|name| name.text.as_str()).collect());
                 let near = near.map(|near| (near, None));
                 let kind = "a stage of the stack";
                 self.report(unknown_name::found(beside.carrier.span, kind, &beside.carrier.text, near));

@@ -3,8 +3,12 @@
 use super::{ReadError, Reader, compile};
 use crate::check::Compiled;
 
+mod bounds;
+mod engines;
 mod examples;
 mod model;
+mod names;
+mod values;
 
 /// Files held in memory.
 struct Files<'a>(&'a [(&'a str, &'a str)]);
