@@ -22,7 +22,8 @@ impl<'a> Context<'a> {
         let want = want.into();
         let literal = plain_literal(expr);
         if found == want.dimension {
-            return literal.is_none_or(|literal| self.style_fits(expr.span, literal, want.style, what));
+            return literal
+                .is_none_or(|literal| self.style_fits(scope, expr.span, literal, want.style, what));
         }
         let written = self.text(expr.span);
         let (found_words, expected) = (with_article(found), with_article(want.dimension));
@@ -52,16 +53,23 @@ impl<'a> Context<'a> {
     }
 
     /// Whether a pure number is written as its place needs: in percent, or not.
-    fn style_fits(&mut self, span: Span, literal: &Literal, style: Style, what: &str) -> bool {
+    fn style_fits(
+        &mut self,
+        scope: ScopeId,
+        span: Span,
+        literal: &Literal,
+        style: Style,
+        what: &str,
+    ) -> bool {
         let is_percent = literal.unit.as_ref().is_some_and(|unit| unit.text == "%");
         let written = self.text(span);
         let diagnostic = match style {
             Style::Percent if literal.unit.is_none() => {
-                let percent = self.show(literal.value * 100.0, "");
+                let percent = self.show(scope, literal.value * 100.0, "");
                 percent_or_number::bare(span, what, written, &percent)
             }
             Style::Plain if is_percent => {
-                let number = self.show(literal.value / 100.0, "");
+                let number = self.show(scope, literal.value / 100.0, "");
                 percent_or_number::percent(span, what, written, &number)
             }
             _ => return true,

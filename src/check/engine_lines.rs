@@ -117,7 +117,7 @@ impl<'a> Context<'a> {
         };
         match self.infer(stated.scope, expr) {
             Some(found) if found.dimension == wrong => {
-                let meant = self.show(found.si * factor, unit);
+                let meant = self.show(stated.scope, found.si * factor, unit);
                 self.report(isp_as_speed::found(expr.span, is, self.text(expr.span), &meant));
                 true
             }
@@ -144,7 +144,7 @@ impl<'a> Context<'a> {
                     .get(line.value.fact.0 as usize)
                     .map(|fact| fact.unit.clone())
                     .unwrap_or_default();
-                let shown = self.show(expected * line.scale, &unit);
+                let shown = self.show(line.stated.scope, expected * line.scale, &unit);
                 places.push((line.stated.span, format!("the other facts make this {shown}")));
             }
         }

@@ -188,7 +188,8 @@ impl<'a> Context<'a> {
         let usable = propulsion.propellant.si - propulsion.unusable.si;
         let burnt = propulsion.engines.si * impulse(curve) / (propulsion.engine.isp.si * G0);
         if (burnt - usable).abs() > IMPULSE_TOLERANCE * usable {
-            let (burnt, usable) = (self.show(burnt, "kg"), self.show(usable, "kg"));
+            let (burnt, usable) =
+                (self.show(stated.scope, burnt, "kg"), self.show(stated.scope, usable, "kg"));
             let name = Name { span: stated.span, text: curve.name.clone() };
             let defined = self.block_named(stated.scope, &name.text).and_then(Result::ok);
             let defined = defined.map(|block| self.definition(block).block.name.span);

@@ -30,8 +30,25 @@ impl<'a> Context<'a> {
         Vec::new()
     }
 
-    /// A number in SI as people read it, in a unit.
-    pub(crate) fn show(&self, si: f64, unit: &str) -> String {
-        format!("{si} {unit}")
+    /// A number in SI as people read it, in a unit (none where that is empty), to five digits.
+    pub(crate) fn show(&self, scope: ScopeId, si: f64, unit: &str) -> String {
+        let known =
+            self.units.get(self.scope(scope).file.0 as usize).and_then(|table| table.parse(unit).ok());
+        match known {
+            Some(known) => format!("{} {unit}", significant((si - known.offset) / known.factor)),
+            None => significant(si),
+        }
+    }
+}
+
+/// Five significant digits, without zeros at the end.
+fn significant(value: f64) -> String {
+    let short = format!("{value:.4e}");
+    let exponent = short.split_once('e').and_then(|(_, exponent)| exponent.parse::<i32>().ok());
+    let Some(exponent) = exponent.filter(|exponent| (-4..9).contains(exponent)) else { return short };
+    let fixed = format!("{value:.*}", (4 - exponent).max(0) as usize);
+    match fixed.contains('.') {
+        true => fixed.trim_end_matches('0').trim_end_matches('.').to_string(),
+        false => fixed,
     }
 }
