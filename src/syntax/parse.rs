@@ -34,11 +34,10 @@ pub fn parse(file: FileId, text: &str) -> Parsed {
     let mut builder = Builder::new(file, text, &read.text);
     let items = match Grammar::parse(Rule::file, &read.text) {
         Ok(pairs) => builder.file(pairs),
-        // The rule `file` takes any text. What is left is a caller with next to no stack, to which
-        // the nesting of any text is too deep.
+        // The rule `file` takes any text; only a thread with next to no stack gets here.
         Err(_) => {
             let whole = Span::new(file, 0, text.len());
-            builder.diagnostics.push(nesting_limit::found(whole, 0));
+            builder.diagnostics.push(nesting_limit::without_stack(whole));
             vec![Item::Broken(whole)]
         }
     };

@@ -17,3 +17,8 @@ pub fn found(span: Span, limit: usize) -> Diagnostic {
     CODE.at(span, format!("more than {limit} brackets are open here"), "this one is too deep")
         .help("give the inner part a name with `given`")
 }
+
+/// For a caller on a thread with too little stack for even 64 levels.
+pub fn without_stack(span: Span) -> Diagnostic {
+    CODE.at(span, "too little stack is left here to read nested text", "not read")
+}

@@ -96,7 +96,7 @@ impl Builder<'_> {
         let meant = block_kind(first).map(|_| first).or_else(|| nearest(first, words::KINDS.iter().copied()));
         let shaped = token::is_name(first) && second.is_none_or(token::is_name) && heads.next().is_none();
         self.report(|| match look::stop(file, read, head, Rule::lone_head) {
-            Some(stop) if meant.is_some() || shaped => stop.diagnostic(),
+            Some(stop) if meant.is_some() || shaped || first.is_empty() => stop.diagnostic(),
             _ => {
                 let brace = Span { start: head.end.saturating_sub(1).max(head.start), ..head };
                 unexpected_text::found(brace, "`{`", "the end of the line")

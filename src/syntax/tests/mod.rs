@@ -7,6 +7,7 @@ mod expressions;
 mod recovery;
 mod rejected;
 mod spans;
+mod statements;
 mod text;
 mod totality;
 mod vocabulary;

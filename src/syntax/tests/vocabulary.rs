@@ -5,15 +5,16 @@ use pest::Parser;
 use crate::syntax::rules::{Grammar, Rule};
 use crate::syntax::{is_keyword, words};
 
+const GRAMMAR: &str = include_str!("../../../grammar/stagewright.pest");
+
 fn takes(rule: Rule, text: &str) -> bool {
     Grammar::parse(rule, text).is_ok_and(|mut pairs| pairs.next().is_some_and(|pair| pair.as_str() == text))
 }
 
 /// The quoted words of a rule of the grammar file.
 fn words_of(rule: &str) -> Vec<&'static str> {
-    let grammar = include_str!("../../../grammar/stagewright.pest");
-    let start = grammar.find(&format!("\n{rule} = @{{")).unwrap();
-    let body = grammar[start..].split_once("!name_char").unwrap().0;
+    let start = GRAMMAR.find(&format!("\n{rule} = @{{")).unwrap();
+    let body = GRAMMAR[start..].split_once("!name_char").unwrap().0;
     body.split('"').skip(1).step_by(2).collect()
 }
 
@@ -45,6 +46,23 @@ fn the_words_that_start_facts_and_blocks_are_known() {
 fn keywords_are_whole_words() {
     assert!(is_keyword("in") && is_keyword("inclination") && is_keyword("with") && is_keyword("within"));
     assert!(!is_keyword("inch") && !is_keyword("kg") && !is_keyword("") && !is_keyword("in vacuum"));
+}
+
+#[test]
+fn every_rule_is_explained() {
+    let mut explained = false;
+    for line in GRAMMAR.lines() {
+        let rule = line.split_once(" = ").map(|(name, _)| name.trim_end());
+        if let Some(name) = rule.filter(|name| !name.contains([' ', '/'])) {
+            assert!(explained || name.starts_with("kw_"), "{name}");
+            let keyword = name.strip_prefix("kw_");
+            assert!(
+                keyword.is_none_or(|word| line.contains(&format!("@{{ \"{word}\" ~ !name_char }}"))),
+                "{name}"
+            );
+        }
+        explained = line.starts_with("/// ");
+    }
 }
 
 /// Rules that a second look cannot expect: they are silent, stand for a whole file, or take anything.
