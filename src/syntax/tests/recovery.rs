@@ -132,3 +132,13 @@ fn definitions_say_what_they_lack() {
 fn at_most_a_thousand_are_told() {
     assert_eq!(codes(&read(&"?\n".repeat(3000))).len(), 1000);
 }
+
+#[test]
+fn one_wrong_character_never_gives_two_diagnostics() {
+    let text = include_str!("lantern.wright");
+    for (at, character) in text.char_indices().filter(|(_, character)| !matches!(character, '\n' | '}')) {
+        let wrong = format!("{}?{}", &text[..at], &text[at + character.len_utf8()..]);
+        let parsed = read(&wrong);
+        assert!(parsed.diagnostics.len() <= 1, "at {at}: {:#?}", parsed.diagnostics);
+    }
+}
