@@ -16,6 +16,10 @@ fn statement(fact: &str) -> Statement {
     }
 }
 
+/// A setting that is expected: the fact, its word, value, end of a range, surroundings, and the names
+/// of its further values.
+type Expected<'t> = (&'t str, Option<&'t str>, Option<&'t str>, bool, Option<Ambient>, &'t [&'t str]);
+
 /// A setting in short: key, word, value, end of the range, surroundings, names of the further values.
 fn setting(fact: &str) -> (String, Option<String>, Option<String>, bool, Option<Ambient>, Vec<String>) {
     let Statement::Setting(setting) = statement(fact) else { panic!("{fact}") };
@@ -36,7 +40,7 @@ fn setting(fact: &str) -> (String, Option<String>, Option<String>, bool, Option<
 
 #[test]
 fn settings_have_their_parts() {
-    let cases: &[(&str, Option<&str>, Option<&str>, bool, Option<Ambient>, &[&str])] = &[
+    let cases: &[Expected] = &[
         ("thrust 43 kN in vacuum", None, Some("43"), false, Some(Ambient::Vacuum), &[]),
         ("isp curve1 at sea_level", None, Some("curve1"), false, Some(Ambient::SeaLevel), &[]),
         ("throttle 55 % .. 100 %", None, Some("55"), true, None, &[]),
