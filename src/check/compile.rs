@@ -2,10 +2,11 @@
 
 use std::collections::{BTreeMap, BTreeSet};
 
+use super::changed::Changes;
 use super::files::{self, Reader};
 use super::{BlockId, Context};
 use crate::diagnostics::{Diagnostic, Severity};
-use crate::model::{FORMAT, Mission, Model};
+use crate::model::{FORMAT, FactId, Mission, Model};
 use crate::source::{FileId, Sources, Span};
 use crate::syntax::{BlockKind, Tree};
 
@@ -19,27 +20,52 @@ pub struct Compiled {
     pub model: Option<Model>,
     /// In the order of the files and of their text, the same one once.
     pub diagnostics: Vec<Diagnostic>,
+    links: BTreeMap<Span, FileId>,
+    addresses: BTreeMap<(BlockId, String), FactId>,
 }
 
 /// Reads, parses and checks `entry` (a path from the project's folder) and all that it brings.
 pub fn compile(entry: &str, reader: &dyn Reader) -> Compiled {
     let files::Project { sources, trees, links, diagnostics: parsing } = files::load(entry, reader);
-    let (model, mut diagnostics) = check(&sources, &trees, &links);
-    diagnostics.extend(parsing);
-    let diagnostics = in_order(diagnostics);
-    let sound = diagnostics.iter().all(|diagnostic| diagnostic.severity() != Severity::Error);
-    Compiled { model: sound.then_some(model), sources, trees, diagnostics }
+    let mut checked = check(&sources, &trees, &links, Changes::default());
+    checked.diagnostics.extend(parsing);
+    let diagnostics = in_order(checked.diagnostics);
+    let model = checked.model.filter(|_| sound(&diagnostics));
+    Compiled { sources, trees, model, diagnostics, links, addresses: checked.addresses }
 }
 
-/// The model of what is sound in some trees, and what is not.
-fn check(sources: &Sources, trees: &[Tree], links: &BTreeMap<Span, FileId>) -> (Model, Vec<Diagnostic>) {
-    let mut context = Context::new(sources, links);
+impl Compiled {
+    /// The model with other values, in SI, for some of its facts; whatever is worked out from them
+    /// changes with them. The numbers of all facts stay the same.
+    ///
+    /// # Errors
+    /// What is wrong with these values, such as a mass below zero.
+    pub fn with(&self, facts: &BTreeMap<FactId, f64>) -> Result<Model, Vec<Diagnostic>> {
+        let changes = Changes::new(facts, &self.addresses);
+        let checked = check(&self.sources, &self.trees, &self.links, changes);
+        checked.model.ok_or_else(|| in_order(checked.diagnostics))
+    }
+}
+
+struct Checked {
+    model: Option<Model>,
+    diagnostics: Vec<Diagnostic>,
+    addresses: BTreeMap<(BlockId, String), FactId>,
+}
+
+fn check(sources: &Sources, trees: &[Tree], links: &BTreeMap<Span, FileId>, changes: Changes) -> Checked {
+    let mut context = Context::new(sources, links, changes);
     context.collect_names(trees);
     context.read_units(trees);
     context.check_blocks();
     let missions = context.check_missions();
-    let model = Model { format: FORMAT.to_string(), missions, facts: context.facts };
-    (model, context.diagnostics)
+    let Context { facts, diagnostics, addresses, .. } = context;
+    let model = sound(&diagnostics).then(|| Model { format: FORMAT.to_string(), missions, facts });
+    Checked { model, diagnostics, addresses }
+}
+
+fn sound(diagnostics: &[Diagnostic]) -> bool {
+    diagnostics.iter().all(|diagnostic| diagnostic.severity() != Severity::Error)
 }
 
 /// Sorted by place; a definition that is used in several ways may have been reported each time.

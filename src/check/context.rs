@@ -3,6 +3,7 @@
 use std::collections::{BTreeMap, BTreeSet, HashMap};
 
 use super::blocks::Results;
+use super::changed::Changes;
 use super::facts::{Owned, Record, Use};
 use super::given::State;
 use super::lines::Inherited;
@@ -38,7 +39,8 @@ pub(crate) struct Context<'a> {
     /// One for each fact.
     pub(super) records: Vec<Record>,
     /// By the block that states it, and its path.
-    pub(super) addresses: HashMap<(BlockId, String), FactId>,
+    pub(super) addresses: BTreeMap<(BlockId, String), FactId>,
+    pub(super) changes: Changes,
     /// What the expressions being worked out have named, innermost last.
     pub(super) naming: Vec<Vec<Use>>,
     pub(super) given_values: HashMap<GivenId, State<Value>>,
@@ -65,7 +67,7 @@ pub(crate) struct Context<'a> {
 const NEAREST_BUDGET: usize = 200_000;
 
 impl<'a> Context<'a> {
-    pub(super) fn new(sources: &'a Sources, links: &'a BTreeMap<Span, FileId>) -> Self {
+    pub(super) fn new(sources: &'a Sources, links: &'a BTreeMap<Span, FileId>, changes: Changes) -> Self {
         Context {
             sources,
             links,
@@ -82,6 +84,7 @@ impl<'a> Context<'a> {
             facts: Default::default(),
             records: Default::default(),
             addresses: Default::default(),
+            changes,
             naming: Default::default(),
             given_values: Default::default(),
             stated: Default::default(),

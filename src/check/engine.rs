@@ -155,7 +155,7 @@ impl<'a> Context<'a> {
     fn steady_performance(&mut self, sheet: &Sheet<'a>) -> Option<(Thrust, Value, Value)> {
         let lines = self.lines_of_engine(sheet);
         let statements: Vec<_> = lines.iter().map(|line| line.statement).collect();
-        if self.report_contradictions(&lines, &statements) {
+        if self.is_unchanged() && self.report_contradictions(&lines, &statements) {
             return None;
         }
         let solution = engine_solve::solve(&statements);

@@ -130,8 +130,10 @@ impl<'a> Context<'a> {
         value
     }
 
-    pub(super) fn add_fact(&mut self, fact: Fact, record: Record) -> Value {
-        let value = Value { si: fact.si, fact: FactId(self.facts.len() as u32) };
+    pub(super) fn add_fact(&mut self, mut fact: Fact, record: Record) -> Value {
+        let id = FactId(self.facts.len() as u32);
+        fact.si = self.changed(id, fact.si);
+        let value = Value { si: fact.si, fact: id };
         self.facts.push(fact);
         self.records.push(record);
         value

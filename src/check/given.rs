@@ -181,7 +181,8 @@ impl<'a> Context<'a> {
         }
         let value = self.infer(scope, expr);
         self.settings.remove(&key);
-        value
+        let changed = self.changed_at(&key);
+        value.map(|value| Typed { si: changed.unwrap_or(value.si), ..value })
     }
 
     /// The expression that states a fact of a block, by the part of its path after the block's name.

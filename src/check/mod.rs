@@ -6,6 +6,7 @@
 #![allow(dead_code, unused_imports)]
 
 mod blocks;
+mod changed;
 mod compile;
 mod context;
 mod curve;

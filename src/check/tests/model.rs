@@ -4,7 +4,7 @@ use super::{Files, codes, compile_text};
 use crate::check::files;
 use crate::check::names::Meaning;
 use crate::check::{BlockId, Context, ScopeId};
-use crate::model::{Air, Drag, Gravity, Origin, Reserve, Role, Surface, Thrust};
+use crate::model::{Air, Drag, FactId, Gravity, Origin, Reserve, Role, Surface, Thrust};
 
 const ROWAN: &str = r#"
 bring Earth from builtin
@@ -61,7 +61,7 @@ vehicle Rowan {
 fn with_block<T>(text: &str, name: &str, look: impl FnOnce(&mut Context<'_>, BlockId) -> T) -> T {
     let project = files::load("example.wright", &Files(&[("example.wright", text)]));
     assert!(project.diagnostics.is_empty(), "{:?}", project.diagnostics);
-    let mut context = Context::new(&project.sources, &project.links);
+    let mut context = Context::new(&project.sources, &project.links, Default::default());
     context.collect_names(&project.trees);
     context.read_units(&project.trees);
     let Some(Meaning::Block(block)) = context.named(ScopeId(0), name).map(|named| named.meaning) else {
@@ -206,4 +206,19 @@ fn errors_of_all_blocks_are_told_at_once_and_none_twice() {
         ]
     );
     assert!(compiled.model.is_none());
+}
+
+#[test]
+fn a_changed_fact_changes_what_is_worked_out_from_it() {
+    let compiled = compile_text(ROWAN);
+    let model = compiled.model.as_ref().unwrap();
+    let id = |path: &str| FactId(model.facts.iter().position(|fact| fact.path == path).unwrap() as u32);
+    let changes = [(id("Bracken.dry"), 1500.0), (id("margin"), 0.1)].into();
+    let changed = compiled.with(&changes).unwrap();
+    let si = |path: &str| changed.facts[id(path).0 as usize].si;
+    assert_eq!((si("Bracken.dry"), si("Bracken.growth")), (1500.0, 0.1));
+    assert!((si("Sorrel.dry") - 300.0).abs() < 1e-9);
+    assert_eq!(changed.facts.len(), model.facts.len());
+    assert_eq!(&compiled.with(&Default::default()).unwrap(), model);
+    assert!(compiled.with(&[(id("Bracken.dry"), -1.0)].into()).is_err());
 }
