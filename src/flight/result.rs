@@ -52,12 +52,14 @@ pub enum Cause {
     GroundImpact { speed: f64 },
     /// A phase went on past the limit of time (s) or steps without its `until` coming true.
     NeverEnds { after: f64 },
-    /// A curve was read outside its range.
-    CurveRange { curve: String, input: f64, low: f64, high: f64 },
+    /// The drag curve was read at a Mach number outside its range.
+    CurveRange { input: f64, low: f64, high: f64 },
     /// A lit part has no usable propellant left and the phase does not end by it.
     RanDry { part: usize },
     /// The step became too small, or a number was not finite.
     Numerical { detail: String },
+    /// Stopped from outside.
+    Interrupted,
 }
 
 /// Frame of the ledger's speed.
@@ -159,8 +161,9 @@ pub struct LedgerRow {
     pub gravity: f64,
     /// Speed at the end less speed at the start, in the ledger's frame.
     pub gained: f64,
-    /// Σ isp·g0·ln(m₀/m₁) over the pieces between mass jumps and changes of the lit set.
-    pub ideal: f64,
+    /// Σ isp·g0·ln(m₀/m₁) over the pieces between mass jumps and changes of the lit set; nothing where
+    /// engines of different isp change their shares within a piece, which has no closed form.
+    pub ideal: Option<f64>,
 }
 
 impl LedgerRow {

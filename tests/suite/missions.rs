@@ -37,7 +37,7 @@ fn model(file: &str) -> Model {
 }
 
 fn flown(model: &Model, mission: &Mission, tolerance: f64) -> Flight {
-    let flight = fly(mission, &model.facts, &Settings { tolerance, ..Settings::default() });
+    let flight = fly(mission, &Settings { tolerance, ..Settings::default() });
     assert_eq!(flight.completion, Completion::Completed, "{}", mission.name);
     flight
 }

@@ -1,0 +1,81 @@
+//! The flight as it was flown: every step with its dense output.
+
+use super::integrate::Dense;
+use super::motion::Motion;
+use super::quantities::Look;
+use super::result::Snapshot;
+use crate::math::Scalar;
+
+/// All steps in order of time.
+pub struct History<'p, S> {
+    segments: Vec<Motion<'p, S>>,
+    legs: Vec<Leg<S>>,
+}
+
+/// One step, and the segment that it belongs to.
+pub struct Leg<S> {
+    segment: usize,
+    dense: Dense<S>,
+}
+
+impl<'p, S: Scalar> History<'p, S> {
+    pub fn new() -> Self {
+        History { segments: Vec::new(), legs: Vec::new() }
+    }
+
+    /// Begins a segment; the steps that follow belong to it.
+    pub fn begin(&mut self, motion: &Motion<'p, S>) {
+        self.segments.push(motion.clone());
+    }
+
+    /// The segment that was begun last, as it began.
+    pub fn segment(&self) -> Option<&Motion<'p, S>> {
+        self.segments.last()
+    }
+
+    pub fn push(&mut self, dense: Dense<S>) {
+        let segment = self.segments.len().saturating_sub(1);
+        self.legs.push(Leg { segment, dense });
+    }
+
+    pub fn legs(&self) -> &[Leg<S>] {
+        &self.legs
+    }
+
+    fn motion(&self, leg: &Leg<S>) -> &Motion<'p, S> {
+        // invariant: a leg is pushed after the segment that it belongs to.
+        &self.segments[leg.segment]
+    }
+
+    /// The phase that a step belongs to.
+    pub fn phase(&self, leg: &Leg<S>) -> usize {
+        self.motion(leg).phase
+    }
+
+    /// Looks at a time within a step.
+    pub fn look<T>(&self, leg: &Leg<S>, time: f64, see: impl FnOnce(&Look<'_, 'p, S>) -> T) -> T {
+        let motion = self.motion(leg);
+        let mut state = vec![S::zero(); motion.dimension()];
+        leg.dense.state(S::from(time), &mut state);
+        see(&Look::new(motion, S::from(time), &state))
+    }
+
+    pub fn snapshot(&self, leg: &Leg<S>, time: f64) -> Snapshot {
+        self.look(leg, time, |look| look.snapshot())
+    }
+
+    /// Whether two steps that follow each other belong to one segment, so that nothing jumps between.
+    pub fn joined(&self, before: &Leg<S>, after: &Leg<S>) -> bool {
+        before.segment == after.segment
+    }
+}
+
+impl<S: Scalar> Leg<S> {
+    pub fn start(&self) -> f64 {
+        self.dense.start()
+    }
+
+    pub fn end(&self) -> f64 {
+        self.dense.end()
+    }
+}

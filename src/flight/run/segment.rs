@@ -1,0 +1,181 @@
+//! One segment, step by step.
+
+use std::sync::atomic::Ordering;
+
+use super::{After, Flown, Run};
+use crate::flight::integrate::{StepFailure, Stepper, Tolerance};
+use crate::flight::motion::COLUMNS;
+use crate::flight::quantities::Look;
+use crate::flight::result::{Cause, Failure};
+use crate::flight::throttle::{Throttle, excess};
+use crate::flight::watch::{Watch, Watches};
+use crate::math::{Scalar, Vector};
+
+/// A phase that goes on longer than this never ends, s.
+pub(super) const LONGEST_PHASE: f64 = 400.0 * 86_400.0;
+/// More steps than this in one segment, and it never ends.
+const MOST_STEPS: u64 = 2_000_000;
+/// So far below the ground nothing flies, m.
+const SUNK: f64 = 1.0;
+
+impl<S: Scalar> Run<'_, '_, S> {
+    /// Flies until something switches or the phase ends.
+    pub(super) fn segment(&mut self) -> Flown<After> {
+        self.light();
+        if let Some(part) = self.curve_over() {
+            return self.burnt_out(part, None);
+        }
+        self.choose_throttle();
+        let watches = self.watches();
+        let mut stops = self.stops();
+        self.book.history.begin(&self.motion);
+        let mut motion = self.motion.clone();
+        let state = self.state();
+        let mut stepper = Stepper::new(tolerance(self.settings.tolerance, self.motion.lit.len()));
+        stepper.start(&mut motion, self.time, &state, self.size);
+        let mut values = watches.values(&Look::new(&motion, self.time, &state));
+        let limit = stops.pop().unwrap_or(self.time);
+        while self.time.real() < limit.real() {
+            if let Err(cause) = self.may_go_on(&stepper) {
+                self.settle(&stepper);
+                return Err(self.failure(cause));
+            }
+            if let Err(failure) = stepper.step(&mut motion, limit) {
+                self.settle(&stepper);
+                return Err(self.broken(failure, &stepper));
+            }
+            let mut dense = stepper.dense(&mut motion);
+            let found = {
+                let first = Look::new(&motion, stepper.start_time(), stepper.start_state());
+                let last = Look::new(&motion, stepper.end_time(), stepper.end_state());
+                watches.earliest(&motion, &dense, &values, &first, &last)
+            };
+            if let Some((time, _)) = found.filter(|(time, _)| *time < stepper.end_time().real()) {
+                stepper.redo(&mut motion, S::from(time.max(stepper.start_time().real())));
+                dense = stepper.dense(&mut motion);
+            }
+            self.book.history.push(dense);
+            self.follow(&stepper);
+            let end = Look::new(&motion, stepper.end_time(), stepper.end_state());
+            values = watches.values(&end);
+            self.notice(&end);
+            let sunk = end.now.local.altitude.real() < watches.ground - SUNK
+                && watches.list.contains(&Watch::Ground);
+            match found {
+                Some((_, Watch::Layer(_) | Watch::Knot(_))) | None if !sunk => {}
+                _ => {
+                    self.settle(&stepper);
+                    let watch = found.map_or(Watch::Ground, |(_, watch)| watch);
+                    return self.comes_about(if sunk { Watch::Ground } else { watch }, &watches);
+                }
+            }
+        }
+        self.settle(&stepper);
+        match self.time.real() >= self.motion.phase_start.real() + LONGEST_PHASE {
+            true => Err(self.failure(Cause::NeverEnds { after: LONGEST_PHASE })),
+            false => Ok(After::Switch),
+        }
+    }
+
+    fn may_go_on(&self, stepper: &Stepper<S>) -> Result<(), Cause> {
+        if stepper.steps() > MOST_STEPS {
+            return Err(Cause::NeverEnds { after: (self.time - self.motion.phase_start).real() });
+        }
+        match self.settings.stop.is_some_and(|stop| stop.load(Ordering::Relaxed)) {
+            true => Err(Cause::Interrupted),
+            false => Ok(()),
+        }
+    }
+
+    /// Takes over the state at the end of the last step.
+    fn follow(&mut self, stepper: &Stepper<S>) {
+        let state = stepper.end_state();
+        self.time = stepper.end_time();
+        self.position = Vector([state[0], state[1], state[2]]);
+        self.velocity = Vector([state[3], state[4], state[5]]);
+        for (index, lit) in self.motion.lit.iter().enumerate() {
+            self.motion.burnt[lit.part] = state[6 + index];
+        }
+    }
+
+    /// Closes the segment's part of the ledger.
+    fn settle(&mut self, stepper: &Stepper<S>) {
+        let first = self.motion.ledger();
+        for (sum, column) in self.motion.columns.iter_mut().zip(&stepper.end_state()[first..]) {
+            *sum += *column;
+        }
+        self.book.settle(&self.motion, stepper);
+        self.size = Some(stepper.next_size());
+    }
+
+    /// What follows from a watch that came about now.
+    fn comes_about(&mut self, watch: Watch, watches: &Watches<S>) -> Flown<After> {
+        match watch {
+            Watch::Range { .. } => {
+                let (low, high) = watches.range();
+                let input = self.look(|look| look.now.mach.real());
+                Err(self.failure(Cause::CurveRange { input, low, high }))
+            }
+            Watch::Ground => {
+                let speed = self.look(|look| look.now.airspeed.real());
+                Err(self.failure(Cause::GroundImpact { speed }))
+            }
+            Watch::Spent(index) => {
+                let part = self.motion.lit[index].part;
+                self.burnt_out(part, watches.burnable.get(index).copied())
+            }
+            Watch::Throttle(next) => {
+                let before = std::mem::replace(&mut self.motion.throttle, next);
+                if (before == Throttle::Commanded) != (next == Throttle::Commanded) {
+                    self.event_of_hold(next != Throttle::Commanded);
+                }
+                self.throttle_chosen = true;
+                Ok(After::Switch)
+            }
+            Watch::Shed(index) => {
+                self.shed[index] = true;
+                self.let_go(self.plan.phases[self.motion.phase].sheds[index].part);
+                Ok(After::Switch)
+            }
+            Watch::Until(condition) => {
+                self.shed_now();
+                Ok(After::Ends(condition))
+            }
+            Watch::Layer(_) | Watch::Knot(_) => Ok(After::Switch),
+        }
+    }
+
+    /// Notes what does not stop the flight.
+    fn notice(&mut self, look: &Look<S>) {
+        let time = look.now.time.real();
+        if !self.motion.lit.is_empty() {
+            self.book.throttled(look.now.throttle.real());
+        }
+        if let (Throttle::Floor, Some(hold)) =
+            (self.motion.throttle, &self.plan.phases[self.motion.phase].hold)
+        {
+            self.book.exceeded(self.motion.phase, excess(hold, &look.now).real(), hold.limit.real(), time);
+        }
+        if let Some(top) = self.plan.air.top().filter(|top| look.now.local.altitude.real() > *top) {
+            self.book.above_air(top, time);
+        }
+    }
+
+    fn broken(&self, failure: StepFailure, stepper: &Stepper<S>) -> Failure {
+        let detail = match failure {
+            StepFailure::TooSmall => format!("the step fell below {:.1e} s", stepper.next_size()),
+            StepFailure::NotFinite => "a number was not finite".to_owned(),
+        };
+        self.failure(Cause::Numerical { detail })
+    }
+}
+
+/// Absolute errors that count as nothing: a micrometre, a nanometre a second and a milligram for a
+/// relative tolerance of 1e-9, and in proportion.
+fn tolerance(relative: f64, lit: usize) -> Tolerance {
+    let mut absolute = vec![1e3 * relative; 3];
+    absolute.extend([relative; 3]);
+    absolute.extend(vec![1e3 * relative; lit]);
+    absolute.extend([relative; COLUMNS]);
+    Tolerance { relative, absolute }
+}
