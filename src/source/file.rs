@@ -35,6 +35,14 @@ impl SourceFile {
         &self.text
     }
 
+    /// Column of a byte offset in UTF-16 units, counted from zero, as editors count.
+    pub fn utf16_column(&self, offset: u32) -> u32 {
+        let offset = (offset as usize).min(self.text.len());
+        let line = self.line_starts.partition_point(|start| *start as usize <= offset) - 1;
+        let start = self.line_starts[line] as usize;
+        self.text.get(start..offset).map_or(offset - start, |before| before.encode_utf16().count()) as u32
+    }
+
     /// Line and column of a byte offset; an offset past the end counts as the end.
     pub fn location(&self, offset: u32) -> Location {
         let offset = (offset as usize).min(self.text.len());
