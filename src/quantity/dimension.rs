@@ -1,9 +1,12 @@
 //! Physical dimensions as exponents of the base quantities, angle among them.
 
+use std::fmt;
+
 use serde::{Deserialize, Serialize};
 
 /// Exponents of length, mass, time, temperature and angle.
 #[derive(Clone, Copy, Debug, Default, PartialEq, Eq, Hash, Serialize, Deserialize, schemars::JsonSchema)]
+#[serde(deny_unknown_fields)]
 pub struct Dimension {
     pub length: i8,
     pub mass: i8,
@@ -12,124 +15,134 @@ pub struct Dimension {
     pub angle: i8,
 }
 
+/// Dimensions that the trade has a name for: constant, name, exponents (m, kg, s, K, rad).
 macro_rules! named {
-    ($($constant:ident [$length:literal $mass:literal $time:literal $temperature:literal $angle:literal] $name:literal;)*) => {
+    ($($constant:ident $name:literal [$l:literal $m:literal $t:literal $k:literal $a:literal];)*) => {
         impl Dimension {
-            $(#[doc = concat!("Dimension of ", $name, ".")]
-            pub const $constant: Dimension = Dimension {
-                length: $length, mass: $mass, time: $time, temperature: $temperature, angle: $angle,
-            };)*
-        }
+            $(#[doc = $name] pub const $constant: Dimension = Dimension::of($l, $m, $t, $k, $a);)*
 
-        /// What the trade calls a dimension.
-        const NAMES: &[(Dimension, &str)] = &[$((Dimension::$constant, $name)),*];
+            const NAMED: &[(Dimension, &'static str)] = &[$((Dimension::$constant, $name)),*];
+        }
     };
 }
 
 named! {
-    NONE [0 0 0 0 0] "a plain number";
-    LENGTH [1 0 0 0 0] "length";
-    MASS [0 1 0 0 0] "mass";
-    TIME [0 0 1 0 0] "time";
-    TEMPERATURE [0 0 0 1 0] "temperature";
-    ANGLE [0 0 0 0 1] "angle";
-    AREA [2 0 0 0 0] "area";
-    VOLUME [3 0 0 0 0] "volume";
-    SPEED [1 0 -1 0 0] "speed";
-    ACCELERATION [1 0 -2 0 0] "acceleration";
-    FREQUENCY [0 0 -1 0 0] "frequency";
-    ANGULAR_RATE [0 0 -1 0 1] "angular rate";
-    ANGULAR_ACCELERATION [0 0 -2 0 1] "angular acceleration";
-    FORCE [1 1 -2 0 0] "force";
-    PRESSURE [-1 1 -2 0 0] "pressure";
-    DENSITY [-3 1 0 0 0] "density";
-    MASS_FLOW [0 1 -1 0 0] "mass flow";
-    IMPULSE [1 1 -1 0 0] "impulse";
-    ENERGY [2 1 -2 0 0] "energy";
-    POWER [2 1 -3 0 0] "power";
-    HEAT_FLUX [0 1 -3 0 0] "heat flux";
-    HEAT_LOAD [0 1 -2 0 0] "heat load";
-    SPECIFIC_ENERGY [2 0 -2 0 0] "specific energy";
-    SPECIFIC_ANGULAR_MOMENTUM [2 0 -1 0 0] "specific angular momentum";
-    SPECIFIC_GAS_CONSTANT [2 0 -2 -1 0] "specific gas constant";
-    GRAVITATIONAL_PARAMETER [3 0 -2 0 0] "gravitational parameter";
+    NONE "plain number" [0 0 0 0 0];
+    LENGTH "length" [1 0 0 0 0];
+    AREA "area" [2 0 0 0 0];
+    VOLUME "volume" [3 0 0 0 0];
+    MASS "mass" [0 1 0 0 0];
+    TIME "time" [0 0 1 0 0];
+    TEMPERATURE "temperature" [0 0 0 1 0];
+    ANGLE "angle" [0 0 0 0 1];
+    SOLID_ANGLE "solid angle" [0 0 0 0 2];
+    FREQUENCY "frequency" [0 0 -1 0 0];
+    SPEED "speed" [1 0 -1 0 0];
+    ACCELERATION "acceleration" [1 0 -2 0 0];
+    ANGULAR_RATE "angular rate" [0 0 -1 0 1];
+    ANGULAR_ACCELERATION "angular acceleration" [0 0 -2 0 1];
+    FORCE "force" [1 1 -2 0 0];
+    PRESSURE "pressure" [-1 1 -2 0 0];
+    DENSITY "density" [-3 1 0 0 0];
+    MASS_FLOW "mass flow" [0 1 -1 0 0];
+    IMPULSE "impulse" [1 1 -1 0 0];
+    ENERGY "energy" [2 1 -2 0 0];
+    POWER "power" [2 1 -3 0 0];
+    HEAT_FLUX "heat flux" [0 1 -3 0 0];
+    SPECIFIC_ENERGY "specific energy" [2 0 -2 0 0];
+    GRAVITATIONAL_PARAMETER "gravitational parameter" [3 0 -2 0 0];
+    MOMENT_OF_INERTIA "moment of inertia" [2 1 0 0 0];
+    VISCOSITY "dynamic viscosity" [-1 1 -1 0 0];
+    VOLUME_FLOW "volume flow" [3 0 -1 0 0];
 }
 
 impl Dimension {
-    /// Dimension of a product; nothing where an exponent leaves its range.
+    const fn of(length: i8, mass: i8, time: i8, temperature: i8, angle: i8) -> Self {
+        Dimension { length, mass, time, temperature, angle }
+    }
+
+    fn exponents(self) -> [i8; 5] {
+        [self.length, self.mass, self.time, self.temperature, self.angle]
+    }
+
+    fn each(self, other: Self, join: impl Fn(i8, i8) -> Option<i8>) -> Option<Self> {
+        let (a, b) = (self.exponents(), other.exponents());
+        let join = |index: usize| join(a[index], b[index]);
+        Some(Dimension::of(join(0)?, join(1)?, join(2)?, join(3)?, join(4)?))
+    }
+
+    /// Of a product; nothing where an exponent leaves its range.
     pub fn times(self, other: Self) -> Option<Self> {
-        self.with(other, i8::checked_add)
+        self.each(other, i8::checked_add)
     }
 
-    /// Dimension of a ratio; nothing where an exponent leaves its range.
+    /// Of a quotient; nothing where an exponent leaves its range.
     pub fn over(self, other: Self) -> Option<Self> {
-        self.with(other, i8::checked_sub)
+        self.each(other, i8::checked_sub)
     }
 
-    /// Dimension of a whole power; nothing where an exponent leaves its range.
+    /// Of a whole power; nothing where an exponent leaves its range.
     pub fn power(self, exponent: i8) -> Option<Self> {
-        self.with(self, |own, _| own.checked_mul(exponent))
+        self.each(self, |own, _| own.checked_mul(exponent))
     }
 
-    /// Dimension of a square root; nothing where an exponent is odd.
+    /// Of a square root; nothing where an exponent is odd.
     pub fn root(self) -> Option<Self> {
-        self.with(self, |own, _| (own % 2 == 0).then_some(own / 2))
+        self.each(self, |own, _| (own % 2 == 0).then_some(own / 2))
     }
 
-    /// What the trade calls it: "force", "mass flow".
+    /// What the trade calls it.
     pub fn name(self) -> Option<&'static str> {
-        NAMES.iter().find(|(dimension, _)| *dimension == self).map(|(_, name)| *name)
+        Self::NAMED.iter().find(|(dimension, _)| *dimension == self).map(|(_, name)| *name)
     }
 
-    /// Its name with its base units, "force (kg·m/s²)"; the base units alone where it has no name.
+    /// For a sentence: `force (kg·m/s²)`, `a plain number`, or the base units where it has no name.
     pub fn describe(self) -> String {
         match self.name() {
-            Some(name) if self == Dimension::NONE => name.to_owned(),
-            Some(name) => format!("{name} ({})", self.base_units()),
-            None => self.base_units(),
+            _ if self == Dimension::NONE => "a plain number".to_owned(),
+            Some(name) => format!("{name} ({self})"),
+            None => self.to_string(),
         }
-    }
-
-    /// The product of SI base units, such as `kg·m/s²`.
-    fn base_units(self) -> String {
-        let parts = [
-            ("kg", self.mass),
-            ("m", self.length),
-            ("s", self.time),
-            ("K", self.temperature),
-            ("rad", self.angle),
-        ];
-        let side = |sign: i16| -> Vec<String> {
-            let powers = parts.iter().map(|(unit, power)| (unit, i16::from(*power) * sign));
-            powers.filter(|(_, power)| *power > 0).map(|(unit, power)| raised(unit, power)).collect()
-        };
-        let (above, below) = (side(1), side(-1));
-        let above = if above.is_empty() { "1".to_owned() } else { above.join("·") };
-        match below.as_slice() {
-            [] => above,
-            [single] => format!("{above}/{single}"),
-            several => format!("{above}/({})", several.join("·")),
-        }
-    }
-
-    fn with(self, other: Self, combine: impl Fn(i8, i8) -> Option<i8>) -> Option<Self> {
-        Some(Dimension {
-            length: combine(self.length, other.length)?,
-            mass: combine(self.mass, other.mass)?,
-            time: combine(self.time, other.time)?,
-            temperature: combine(self.temperature, other.temperature)?,
-            angle: combine(self.angle, other.angle)?,
-        })
     }
 }
 
-/// A unit with a positive power set small and high; a power of one is not shown.
-fn raised(unit: &str, power: i16) -> String {
-    if power == 1 {
-        return unit.to_owned();
+/// The SI base units, such as `kg·m/s²`; `1` for a plain number.
+impl fmt::Display for Dimension {
+    fn fmt(&self, f: &mut fmt::Formatter<'_>) -> fmt::Result {
+        const ORDER: [(usize, &str); 5] = [(1, "kg"), (0, "m"), (2, "s"), (3, "K"), (4, "rad")];
+        let exponents = self.exponents();
+        let side = |sign: i16| -> Vec<String> {
+            let held = ORDER.iter().map(|(index, symbol)| (i16::from(exponents[*index]) * sign, symbol));
+            held.filter(|(exponent, _)| *exponent > 0)
+                .map(|(exponent, symbol)| format!("{symbol}{}", superscript(exponent)))
+                .collect()
+        };
+        let (above, below) = (side(1), side(-1));
+        let above = if above.is_empty() { "1".to_owned() } else { above.join("·") };
+        match below.len() {
+            0 => f.write_str(&above),
+            1 => write!(f, "{above}/{}", below[0]),
+            _ => write!(f, "{above}/({})", below.join("·")),
+        }
     }
-    let high = ['⁰', '¹', '²', '³', '⁴', '⁵', '⁶', '⁷', '⁸', '⁹'];
-    let digits = power.to_string();
-    let digits = digits.chars().filter_map(|digit| high.get(digit.to_digit(10)? as usize));
-    unit.chars().chain(digits.copied()).collect()
+}
+
+/// An exponent as raised digits; nothing for one.
+fn superscript(exponent: i16) -> String {
+    if exponent == 1 {
+        return String::new();
+    }
+    let raised = |digit: char| match digit {
+        '0' => '⁰',
+        '1' => '¹',
+        '2' => '²',
+        '3' => '³',
+        '4' => '⁴',
+        '5' => '⁵',
+        '6' => '⁶',
+        '7' => '⁷',
+        '8' => '⁸',
+        _ => '⁹',
+    };
+    exponent.to_string().chars().map(raised).collect()
 }

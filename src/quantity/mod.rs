@@ -1,20 +1,15 @@
 //! Dimensions, units, and numbers as people write and read them.
 
+mod builtin;
 mod dimension;
-mod number;
-mod parse;
-mod rows;
+mod format;
 mod system;
-mod table;
-mod unit;
-
-pub use dimension::Dimension;
-pub use number::{Digits, digits_written, format_si};
-pub use parse::{UnitError, UnitErrorKind};
-pub use rows::Row;
-pub use system::{System, usual_units};
-pub use table::{DefineError, UnitTable};
-pub use unit::Unit;
-
 #[cfg(test)]
 mod tests;
+mod unit;
+
+pub use builtin::{Row, advice};
+pub use dimension::Dimension;
+pub use format::{Written, digits_written, format_fixed, format_number, format_si};
+pub use system::System;
+pub use unit::{Unit, UnitError, UnitErrorKind, UnitTable};
