@@ -95,8 +95,11 @@ impl<'a> Context<'a> {
     }
 
     /// Reports a fact that a block lacks: `what` it is ("the payload") and how one writes it
-    /// ("payload  132 kg").
+    /// ("payload  132 kg"). Silent where a line of the block that could not be read may state it.
     pub(crate) fn missing(&mut self, block: BlockId, what: &str, example: &str) {
+        if self.incomplete.contains(&block) {
+            return;
+        }
         let block = self.definition(block).block;
         self.report(missing_fact::found(
             block.name.span,

@@ -56,7 +56,7 @@ struct Checked {
 fn check(sources: &Sources, trees: &[Tree], links: &BTreeMap<Span, FileId>, changes: Changes) -> Checked {
     let mut context = Context::new(sources, links, changes);
     context.collect_names(trees);
-    context.read_units(trees);
+    context.read_units();
     context.check_blocks();
     let missions = context.check_missions();
     let Context { facts, diagnostics, addresses, .. } = context;

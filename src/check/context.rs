@@ -31,8 +31,13 @@ pub(crate) struct Context<'a> {
     pub(super) mission_givens: HashMap<(BlockId, &'a str), GivenId>,
     pub(super) mission_scopes: HashMap<(BlockId, ScopeId), ScopeId>,
     pub(super) lines: HashMap<BlockId, Vec<Inherited<'a>>>,
+    /// Blocks with lines that could not be read, or that are like something unknown: what they seem
+    /// to lack is not reported.
+    pub(super) incomplete: BTreeSet<BlockId>,
     /// By the scope of a file.
     pub(super) units: Vec<UnitTable>,
+    /// Units whose definitions are wrong, which has been reported.
+    pub(super) broken_units: BTreeSet<(ScopeId, String)>,
 
     /// Every number met so far; [`FactId`] is an index into it.
     pub(super) facts: Vec<Fact>,
@@ -80,7 +85,9 @@ impl<'a> Context<'a> {
             mission_givens: Default::default(),
             mission_scopes: Default::default(),
             lines: Default::default(),
+            incomplete: Default::default(),
             units: Default::default(),
+            broken_units: Default::default(),
             facts: Default::default(),
             records: Default::default(),
             addresses: Default::default(),

@@ -31,7 +31,6 @@ impl<'a> Context<'a> {
         let diagnostic = match (literal, unit) {
             (Some(_), None) => {
                 let units = self.units_of(scope, want.dimension);
-                let units: Vec<_> = units.iter().map(String::as_str).collect();
                 missing_unit::found(expr.span, what, written, &expected, &units)
             }
             (Some(literal), Some(unit))
@@ -125,7 +124,7 @@ fn help_with_angle(diagnostic: Diagnostic, found: Dimension, wanted: Dimension) 
 }
 
 fn is_pound(unit: &str) -> bool {
-    ["lbf", "lbm", "lb", "klbf"].contains(&unit)
+    ["lbf", "lbm"].contains(&unit)
 }
 
 /// The pound that was meant, where one stands for the other.
@@ -137,9 +136,13 @@ fn other_pound(found: Dimension, wanted: Dimension) -> Option<&'static str> {
     }
 }
 
-/// "a force", "an area", "a pure number"
+/// "a force (kg·m/s²)", "an area (m²)", "a plain number"
 pub(crate) fn with_article(dimension: Dimension) -> String {
     let words = dimension.describe();
-    let article = if words.starts_with(['a', 'e', 'i', 'o']) { "an" } else { "a" };
-    format!("{article} {words}")
+    match dimension.name() {
+        _ if dimension == Dimension::NONE => words,
+        Some(name) if name.starts_with(['a', 'e', 'i', 'o']) => format!("an {words}"),
+        Some(_) => format!("a {words}"),
+        None => format!("a quantity in {words}"),
+    }
 }

@@ -10,7 +10,7 @@ use crate::diagnostics::codes::{
 };
 use crate::model::{Curve, Engine, Thrust, Value};
 use crate::quantity::Dimension;
-use crate::syntax::{Ambient, BlockKind};
+use crate::syntax::{Ambient, BlockKind, Name};
 
 const KEYS: &[Key] = &[
     Key::new("thrust", "thrust  43.0 kN in vacuum").ambient(),
@@ -99,21 +99,29 @@ impl<'a> Context<'a> {
         let stated = sheet.get_in("thrust", Ambient::Vacuum).or_else(|| sheet.get("thrust"))?;
         let name = stated.name().filter(|name| self.find_given(stated.scope, &name.text).is_none())?;
         let curve = self.find_block(stated.scope, BlockKind::Curve, name).and_then(|curve| self.curve(curve));
-        let curve = curve.and_then(|curve| {
-            let axis =
-                curve.axes.first().filter(|axis| axis.name == "time" && axis.dimension == Dimension::TIME);
-            if axis.is_some() && curve.axes.len() == 1 && curve.output_dimension == Dimension::FORCE {
-                return Some(curve);
-            }
-            self.report(unfit_curve::found(
-                name.span,
-                &name.text,
-                "thrust over time",
-                "time [s] -> thrust [kN]",
-            ));
-            None
-        });
+        let curve = curve.filter(|curve| self.check_thrust_curve(name, curve));
         Some((stated, curve))
+    }
+
+    /// Force over the time since it was lit, nowhere below zero.
+    fn check_thrust_curve(&mut self, name: &Name, curve: &Curve) -> bool {
+        let axis = curve.axes.first().filter(|axis| axis.name == "time" && axis.dimension == Dimension::TIME);
+        let Some(axis) = axis.filter(|_| curve.axes.len() == 1 && curve.output_dimension == Dimension::FORCE)
+        else {
+            let header = "time [s] -> thrust [kN]";
+            self.report(unfit_curve::found(name.span, &name.text, "thrust over time", header));
+            return false;
+        };
+        let found = if curve.values.iter().any(|thrust| *thrust < 0.0) {
+            "a thrust below zero"
+        } else if axis.points.first().is_none_or(|start| *start != 0.0) {
+            "no thrust at 0 s, when it is lit"
+        } else {
+            return true;
+        };
+        let found = format!("`{}` has {found}", name.text);
+        self.report(impossible_value::found(name.span, &found, "thrust from 0 s on, zero or more"));
+        false
     }
 
     /// A thrust over time goes with an isp in vacuum and an exit area; nothing else can be told from it.

@@ -6,7 +6,7 @@ use super::engine_solve::{self, Slot, Statement};
 use super::sheet::{Sheet, Stated};
 use crate::diagnostics::codes::{contradiction, isp_as_speed, missing_ambient};
 use crate::model::Value;
-use crate::quantity::Dimension;
+use crate::quantity::{Dimension, digits_written};
 use crate::source::Span;
 use crate::syntax::{Ambient, Expr, ExprKind};
 
@@ -128,7 +128,7 @@ impl<'a> Context<'a> {
     /// Half a unit of the last digit of a plain number, in SI; zero for an expression.
     fn half_last_digit(&mut self, stated: &Stated<'a>, expr: &Expr) -> f64 {
         let ExprKind::Number(literal) = &expr.kind else { return 0.0 };
-        let half = engine_solve::half_last_digit(self.text(literal.digits));
+        let half = digits_written(self.text(literal.digits)).map_or(0.0, |written| written.last / 2.0);
         let factor =
             literal.unit.as_ref().and_then(|unit| self.unit(stated.scope, unit)).map(|unit| unit.factor);
         half * factor.unwrap_or(1.0)

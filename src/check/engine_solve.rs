@@ -2,7 +2,7 @@
 //!
 //! F is thrust, I specific impulse, ṁ mass flow, Aₑ exit area, p₀ the pressure at sea level:
 //! F_vacuum − F_sea = p₀·Aₑ, and F = ṁ·I·g₀ in vacuum and at sea level with the same ṁ
-//! (Sutton and Biblarz, *Rocket Propulsion Elements*, 9th ed., eqs. 2-5, 2-13 and 2-14).
+//! (Sutton and Biblarz, *Rocket Propulsion Elements*, 9th ed., chapter 2).
 
 /// Pa, on any world.
 pub(super) const SEA_LEVEL_PRESSURE: f64 = 101_325.0;
@@ -120,15 +120,4 @@ pub(super) fn contradiction(statements: &[Statement], index: usize) -> Option<f6
         }
     }
     ((statement.si - expected).abs() > allowed).then_some(expected)
-}
-
-/// Half a unit of the last digit of a number as written: 0.05 for `43.0`, 50 for `1.2e3`.
-pub(super) fn half_last_digit(written: &str) -> f64 {
-    let (digits, exponent) = written.split_once(['e', 'E']).unwrap_or((written, "0"));
-    let decimals = digits
-        .split_once('.')
-        .map_or(0, |(_, decimals)| decimals.chars().filter(char::is_ascii_digit).count());
-    let exponent: i64 = exponent.parse().unwrap_or(0);
-    // The library's parser rounds correctly, which a power of ten by multiplication does not.
-    format!("0.5e{}", exponent - decimals as i64).parse().unwrap_or(0.0)
 }

@@ -66,16 +66,16 @@ impl<'a> Context<'a> {
         value
     }
 
-    /// Where a path in an expression is defined: a given's name or a block's.
-    pub(super) fn defined_at(&self, scope: ScopeId, expr: &Expr) -> Option<Span> {
+    /// Where the value that an expression names is stated: that of a given, or of a fact of a block.
+    pub(super) fn defined_at(&mut self, scope: ScopeId, expr: &Expr) -> Option<Span> {
         let ExprKind::Path(path) = &expr.kind else { return None };
         let [first, rest @ ..] = path.parts.as_slice() else { return None };
-        match self.find_given(scope, &first.text) {
-            Some(given) if rest.is_empty() => {
-                self.givens.get(given.0 as usize).map(|given| given.given.value.span)
-            }
-            _ => None,
+        if rest.is_empty() {
+            let given = self.find_given(scope, &first.text)?;
+            return self.givens.get(given.0 as usize).map(|given| given.given.value.span);
         }
+        let block = self.block_named(scope, &first.text)?.ok()?;
+        self.setting(block, &dotted(rest)).map(|(stated, _)| stated.span)
     }
 
     /// The value of a path in a constant expression.

@@ -6,7 +6,7 @@ use super::names::Meaning;
 use super::{BlockId, Context, ScopeId};
 use crate::diagnostics::codes::{circular_definition, repeated_fact, too_deep};
 use crate::source::Span;
-use crate::syntax::{Ambient, Block, BlockKind, Line, Statement};
+use crate::syntax::{Ambient, Block, BlockKind, Line, Name, Statement};
 
 /// A line of a block, its own or inherited through `like`.
 #[derive(Clone, Copy, Debug)]
@@ -48,6 +48,9 @@ impl<'a> Context<'a> {
                 BlockKind::Mission => self.mission_scope(block, own.scope),
                 _ => own.scope,
             };
+            if own.block.lines.iter().any(|line| matches!(line.statement, Statement::Broken)) {
+                self.incomplete.insert(block);
+            }
             let lines = self.once(own.block);
             if lines.iter().any(|line| is_table(&line.statement)) {
                 merged.retain(|before| !is_table(&before.line.statement));
@@ -78,23 +81,29 @@ impl<'a> Context<'a> {
         let mut chain = vec![block];
         let mut current = self.definition(block);
         while let Some(like) = &current.block.like {
-            let Some(next) = self.find_block(current.scope, current.block.kind, like) else { break };
-            if chain.contains(&next) {
-                self.report(circular_definition::found(
-                    like.span,
-                    &like.text,
-                    Some(self.definition(next).block.name.span),
-                ));
+            let next = self.find_block(current.scope, current.block.kind, like);
+            let Some(next) = next.filter(|next| self.may_follow(&chain, *next, like)) else {
+                self.incomplete.insert(block);
                 break;
-            }
-            if chain.len() == GENERATIONS {
-                self.report(too_deep::found(like.span));
-                break;
-            }
+            };
             chain.push(next);
             current = self.definition(next);
         }
         chain
+    }
+
+    /// Reports a chain of `like` that closes a circle or grows too long.
+    fn may_follow(&mut self, chain: &[BlockId], next: BlockId, like: &Name) -> bool {
+        if chain.contains(&next) {
+            let defined = self.definition(next).block.name.span;
+            self.report(circular_definition::found(like.span, &like.text, Some(defined)));
+            return false;
+        }
+        if chain.len() == GENERATIONS {
+            self.report(too_deep::found(like.span));
+            return false;
+        }
+        true
     }
 
     /// The lines of one block without the broken ones and without repetitions, which are reported.

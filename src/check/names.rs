@@ -144,6 +144,8 @@ impl<'a> Context<'a> {
         let named = Named { meaning, defined, here: name.span };
         let names = &mut self.scope_mut(scope).names;
         match names.get(name.text.as_str()) {
+            // The same definition brought twice does no harm.
+            Some(first) if first.meaning == meaning => {}
             Some(first) if first.meaning != Meaning::Broken => {
                 let first = first.here;
                 self.report(duplicate_name::found(name.span, &name.text, first));

@@ -137,10 +137,12 @@ impl<'a> Context<'a> {
                     let because = line.because.as_ref();
                     lines.push(Stated { setting, scope: inherited.scope, because, span: line.span, key });
                 }
-                None if inherited.from == block => {
-                    self.misplaced(definition.kind, line.span, &line.statement, &words)
+                None => {
+                    self.incomplete.insert(block);
+                    if inherited.from == block {
+                        self.misplaced(definition.kind, line.span, &line.statement, &words);
+                    }
                 }
-                None => {}
             }
         }
         Sheet { block, name: &definition.name.text, span: definition.name.span, lines }

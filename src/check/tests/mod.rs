@@ -6,6 +6,7 @@ use crate::check::Compiled;
 mod bounds;
 mod engines;
 mod examples;
+mod missions;
 mod model;
 mod names;
 mod values;

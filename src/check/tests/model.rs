@@ -63,7 +63,7 @@ fn with_block<T>(text: &str, name: &str, look: impl FnOnce(&mut Context<'_>, Blo
     assert!(project.diagnostics.is_empty(), "{:?}", project.diagnostics);
     let mut context = Context::new(&project.sources, &project.links, Default::default());
     context.collect_names(&project.trees);
-    context.read_units(&project.trees);
+    context.read_units();
     let Some(Meaning::Block(block)) = context.named(ScopeId(0), name).map(|named| named.meaning) else {
         panic!("{name} is no block");
     };

@@ -84,3 +84,15 @@ fn blocks_may_use_each_others_facts_in_any_order() {
         assert!(compiled.diagnostics.is_empty(), "{text}: {:?}", compiled.diagnostics);
     }
 }
+
+#[test]
+fn what_may_stand_in_an_unreadable_line_is_not_missing() {
+    for (text, expected) in [
+        ("stage S { drey 1 kg }\n", vec!["unknown-fact"]),
+        ("engine A like B { thrust 1 kN in vacuum }\n", vec!["unknown-name"]),
+    ] {
+        assert_eq!(codes(&compile_text(text)), expected, "{text}");
+    }
+    let found = codes(&compile_text("engine Ember {\n thrust 43 kN in a vacuum\n isp 304 s in vacuum\n}\n"));
+    assert!(!found.contains(&"missing-fact"), "{found:?}");
+}

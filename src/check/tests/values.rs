@@ -65,6 +65,10 @@ fn a_mismatch_shows_use_and_definition() {
     assert_eq!(found.code.name, "dimension-mismatch");
     let places: Vec<_> = found.labels.iter().map(|label| compiled.sources.text(label.span)).collect();
     assert_eq!(places, ["heavy", "3 kN"]);
+    let compiled = compile_text("stage T { dry 2 t }\nstage S { dry 3 kg + T.growth }\n");
+    assert_eq!(codes(&compiled), ["dimension-mismatch"]);
+    let compiled = compile_text("stage T { dry 2 t growth 3 % }\nstage S { dry T.growth }\n");
+    assert_eq!(compiled.sources.text(compiled.diagnostics[0].labels[1].span), "3 %");
     let compiled = compile_text("given x exp(3 deg)\n");
     assert!(compiled.diagnostics[0].help.as_deref().unwrap().contains("1 rad"));
 }
@@ -111,7 +115,36 @@ fn points_come_from_files_of_comma_separated_values() {
         ("time [s],thrust [kN]\n0,nan\n1,2\n", vec!["impossible-value"]),
         ("time [s],thrust [kN]\n0,1\n1\n", vec!["curve-width"]),
         ("time [s],thrust [km]\n0,1\n1,2\n", vec!["unfit-curve"]),
+        ("time [s],thrust [kN]\n0,1\n1,-2\n", vec!["impossible-value"]),
+        ("time [s],thrust [kN]\n0.1,1\n1,2\n", vec!["impossible-value"]),
     ] {
         assert_eq!(codes(&with_table(table)), expected, "{table}");
     }
+}
+
+#[test]
+fn files_define_and_bring_units() {
+    let parts = "unit smoot = 1.7018 m\nunit furlong = 220 yd\n";
+    let main = "bring smoot from \"parts.wright\"\nunit ken = 2 smoot\ngiven x 3 ken\n";
+    let compiled = compile("main.wright", &Files(&[("main.wright", main), ("parts.wright", parts)]));
+    assert!(compiled.diagnostics.is_empty(), "{:?}", compiled.diagnostics);
+    assert!((compiled.model.unwrap().facts[0].si - 6.0 * 1.7018).abs() < 1e-12);
+    for (text, expected) in [
+        ("unit m = 2 km\n", vec!["duplicate-name"]),
+        ("unit a = -2 km\ngiven x 3 a\n", vec!["impossible-value"]),
+        ("unit a = 2 kms\ngiven x 3 a\n", vec!["unknown-unit"]),
+        ("unit a = 2 a\n", vec!["unknown-unit"]),
+        ("given x 3 lb\n", vec!["unknown-unit"]),
+    ] {
+        assert_eq!(codes(&compile_text(text)), expected, "{text}");
+    }
+}
+
+#[test]
+fn the_units_that_would_do_are_offered() {
+    let compiled = compile_text("stage S { dry 290 }\n");
+    assert_eq!(
+        compiled.diagnostics[0].help.as_deref(),
+        Some("write its unit, such as `290 kg`; it may be kg, lbm, g, t, ozm")
+    );
 }

@@ -45,6 +45,12 @@ pub fn in_one_mission(span: Span, name: &str, first: Span) -> Diagnostic {
         .help("rename one of them: the addresses of their facts would be the same")
 }
 
+/// A unit of a name that is taken, perhaps by a built-in one.
+pub fn unit(span: Span, name: &str) -> Diagnostic {
+    CODE.at(span, format!("there is a unit `{name}` already, or the name is kept back"), "defined again here")
+        .help("choose another name")
+}
+
 /// Two parts of a vehicle of one name.
 pub fn part(span: Span, name: &str, first: Span) -> Diagnostic {
     CODE.at(span, format!("`{name}` stands twice in this vehicle"), "stands again here")

@@ -33,10 +33,6 @@ stage Sorrel {
 ",
 };
 
-pub fn found(span: Span, unit: &str, why: &str, help: Option<String>) -> Diagnostic {
-    let diagnostic = CODE.at(span, format!("`{unit}` is not a unit: {why}"), "unknown unit");
-    match help {
-        Some(help) => diagnostic.help(help),
-        None => diagnostic,
-    }
+pub fn found(span: Span, unit: &str, why: &str, help: String) -> Diagnostic {
+    CODE.at(span, format!("`{unit}` is not a unit: {why}"), "not a unit").help(help)
 }
