@@ -9,6 +9,7 @@ use crate::check::compile;
 /// Generous, since tests run unoptimised and side by side; what is quadratic takes minutes.
 const PATIENCE: Duration = Duration::from_secs(20);
 
+#[allow(clippy::disallowed_methods, reason = "a test of time reads the clock")]
 fn timed(text: &str) -> Vec<&'static str> {
     let start = Instant::now();
     let compiled = compile_text(text);
