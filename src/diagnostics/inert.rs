@@ -11,6 +11,11 @@ pub fn inert_line(text: &str) -> String {
     text.chars().map(|c| if matches!(c, '\n' | '\r' | '\t') { ' ' } else { harmless(c) }).collect()
 }
 
+/// Whether a character is shown as it is; tabs and line ends are not.
+pub(super) fn is_harmless(c: char) -> bool {
+    harmless(c) == c
+}
+
 fn harmless(c: char) -> char {
     match c {
         // The control pictures of Unicode stand in the order of the controls.

@@ -1,13 +1,15 @@
 //! Diagnostics for people: the only module that knows how they are drawn.
 
+use std::collections::BTreeMap;
 use std::fmt::Write;
+use std::sync::Arc;
 
 use miette::{
     GraphicalReportHandler, GraphicalTheme, LabeledSpan, MietteDiagnostic, NamedSource, Report,
     ThemeCharacters, ThemeStyles,
 };
 
-use super::inert::{inert, inert_line};
+use super::inert::{inert, inert_line, is_harmless};
 use super::{Diagnostic, Severity};
 use crate::source::{FileId, Sources};
 
@@ -27,10 +29,17 @@ pub fn render_terminal(diagnostics: &[Diagnostic], sources: &Sources, colour: bo
         .with_context_lines(1)
         .without_syntax_highlighting()
         .with_links(false);
+    // Each file is made harmless once, however many diagnostics it has.
+    let mut texts: BTreeMap<FileId, Arc<str>> = BTreeMap::new();
     let mut text = String::new();
     for diagnostic in diagnostics.iter().take(SHOWN) {
         let file = diagnostic.labels.first().map(|label| label.span.file);
-        let report = report(diagnostic, sources, file);
+        let source = file.map(|id| {
+            let file = sources.file(id);
+            let text = texts.entry(id).or_insert_with(|| same_bytes(file.text()).into());
+            NamedSource::new(inert_line(file.name()), Arc::clone(text))
+        });
+        let report = report(diagnostic, file, source);
         // Writing into a string cannot fail.
         let _ = handler.render_report(&mut text, report.as_ref());
         for label in diagnostic.labels.iter().filter(|label| Some(label.span.file) != file) {
@@ -50,12 +59,17 @@ pub fn render_terminal(diagnostics: &[Diagnostic], sources: &Sources, colour: bo
     text
 }
 
-fn report(diagnostic: &Diagnostic, sources: &Sources, file: Option<FileId>) -> Report {
+/// One diagnostic in the library's form, with those of its places that lie in its file.
+fn report(diagnostic: &Diagnostic, file: Option<FileId>, source: Option<NamedSource<Arc<str>>>) -> Report {
+    // The library panics at a place beyond the end.
+    let size = source.as_ref().map_or(0, |source| source.inner().len());
     let same = diagnostic.labels.iter().enumerate().filter(|(_, label)| Some(label.span.file) == file);
     let labels: Vec<LabeledSpan> = same
         .map(|(index, label)| {
             let text = Some(inert_line(&label.text)).filter(|text| !text.is_empty());
-            let (start, length) = (label.span.start as usize, label.span.len());
+            let end = (label.span.end as usize).min(size);
+            let start = (label.span.start as usize).min(end);
+            let length = end - start;
             match index {
                 0 => LabeledSpan::new_primary_with_span(text, (start, length)),
                 _ => LabeledSpan::new(text, start, length),
@@ -74,10 +88,8 @@ fn report(diagnostic: &Diagnostic, sources: &Sources, file: Option<FileId>) -> R
         None => shown,
     };
     let report = Report::new(shown);
-    match file.map(|file| sources.file(file)) {
-        Some(file) => {
-            report.with_source_code(NamedSource::new(inert_line(file.name()), same_bytes(file.text())))
-        }
+    match source {
+        Some(source) => report.with_source_code(source),
         None => report,
     }
 }
@@ -86,10 +98,7 @@ fn report(diagnostic: &Diagnostic, sources: &Sources, file: Option<FileId>) -> R
 fn same_bytes(text: &str) -> String {
     let mut shown = String::with_capacity(text.len());
     for c in text.chars() {
-        if c == '\n'
-            || c == '\t'
-            || inert_line(c.encode_utf8(&mut [0; 4])) == c.encode_utf8(&mut [0; 4]) as &str
-        {
+        if c == '\n' || c == '\t' || is_harmless(c) {
             shown.push(c);
         } else {
             shown.extend(std::iter::repeat_n(' ', c.len_utf8()));

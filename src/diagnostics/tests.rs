@@ -63,3 +63,19 @@ fn codes_are_words_in_order() {
         assert!(!code.title.is_empty() && !code.explanation.is_empty(), "{}", code.name);
     }
 }
+
+/// Also past the end, where the drawing library itself would panic.
+#[test]
+fn any_place_can_be_shown() {
+    let text = "stage A {\r\n\tengines 1 of Embr\r\r\n é\u{1b}\u{feff}}";
+    let (sources, _) = sources(text);
+    for start in 0..=text.len() + 2 {
+        for end in start..=text.len() + 2 {
+            let span = Span::new(crate::source::FileId(0), start, end);
+            let said = unknown_name::found(span, "an engine", "Embr", None);
+            let shown = render_terminal(std::slice::from_ref(&said), &sources, false, 80);
+            assert!(shown.contains("unknown-name"), "{start}..{end}: {shown}");
+            render_json(&[said], &sources);
+        }
+    }
+}

@@ -58,11 +58,12 @@ pub fn digits_written(text: &str) -> Option<Written> {
     let (mantissa, exponent) = text.split_once(['e', 'E']).unwrap_or((text, "0"));
     let exponent: i32 = exponent.parse().ok()?;
     let (whole, fraction) = mantissa.split_once('.').unwrap_or((mantissa, ""));
-    if !whole.bytes().chain(fraction.bytes()).all(|byte| byte.is_ascii_digit()) || mantissa.is_empty() {
+    if !whole.bytes().chain(fraction.bytes()).all(|byte| byte.is_ascii_digit()) || whole.is_empty() {
         return None;
     }
     let digits = format!("{whole}{fraction}");
     let significant = digits.trim_start_matches('0').len().max(1);
-    let last: f64 = format!("1e{}", exponent - fraction.len() as i32).parse().ok()?;
+    let exponent = i64::from(exponent) - i64::try_from(fraction.len()).ok()?;
+    let last: f64 = format!("1e{exponent}").parse().ok()?;
     Some(Written { significant, last })
 }

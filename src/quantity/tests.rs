@@ -169,3 +169,18 @@ proptest! {
         prop_assert!((read - value).abs() <= 1e-8 * value.abs());
     }
 }
+
+#[test]
+fn products_beyond_the_range_of_numbers_overflow() {
+    for text in ["Tm^20*Tm^20", "pm^20*pm^20", "pm/Tm^26", "Tm^20/pm^20"] {
+        let error = UnitTable::builtin().parse(text).map_err(|error| error.kind);
+        assert_eq!(error, Err(UnitErrorKind::Overflow), "{text}");
+    }
+}
+
+#[test]
+fn digits_of_extreme_exponents() {
+    assert_eq!(digits_written("1.5e-2147483648").map(|written| written.last), Some(0.0));
+    assert_eq!(digits_written("1e99999999999"), None);
+    assert_eq!(digits_written("."), None);
+}

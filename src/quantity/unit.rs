@@ -46,7 +46,7 @@ pub enum UnitErrorKind {
     BadPower,
     /// The reading of a thermometer within a product.
     TemperatureInProduct,
-    /// The exponents leave their range.
+    /// The exponents or the factor leave their range.
     Overflow,
     /// A factor is missing.
     Empty,
@@ -125,9 +125,10 @@ impl UnitTable {
                 false => product.dimension.times(factor.dimension),
             };
             let overflow = UnitError { start: at, end: at + length, kind: UnitErrorKind::Overflow };
-            product.dimension = joined.ok_or(overflow)?;
             product.factor =
                 if divide { product.factor / factor.factor } else { product.factor * factor.factor };
+            // Less than normal would not keep its digits.
+            product.dimension = joined.filter(|_| product.factor.is_normal()).ok_or(overflow)?;
             if length == rest.len() {
                 return Ok(product);
             }
