@@ -95,14 +95,14 @@ impl<'a> Context<'a> {
     /// Checks the missions of the entry file, in the order of the source; those of other files are
     /// there to be defined by difference to.
     fn check_missions(&mut self) -> Vec<Mission> {
-        let blocks = self.blocks().into_iter();
-        let _of_entry: Vec<BlockId> = blocks
-            .filter(|block| {
-                let block = self.definition(*block).block;
-                block.kind == BlockKind::Mission && block.name.span.file == FileId(0)
-            })
-            .collect();
-        Vec::new()
+        let mut missions = Vec::new();
+        for block in self.blocks() {
+            let definition = self.definition(block).block;
+            if definition.kind == BlockKind::Mission && definition.name.span.file == FileId(0) {
+                missions.extend(self.mission(block));
+            }
+        }
+        missions
     }
 
     fn blocks(&self) -> Vec<BlockId> {

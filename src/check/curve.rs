@@ -110,12 +110,15 @@ impl<'a> Context<'a> {
     /// Points and values of a curve over two quantities: every point of the first goes with every
     /// point of the second, which runs fastest.
     fn two_axes(&mut self, table: &Table, name: Span) -> Option<(Vec<Vec<f64>>, Vec<f64>)> {
-        let start = table.rows.first()?;
+        let Some(start) = table.rows.first() else {
+            self.report(curve_too_short::found(name, 0, None));
+            return None;
+        };
         let width = table.rows.iter().take_while(|row| value(row, 0) == value(start, 0)).count();
         let second: Vec<f64> = table.rows.iter().take(width).map(|row| value(row, 1)).collect();
         let mut first = Vec::new();
         let mut last: Option<&Row> = None;
-        for group in table.rows.chunks(width) {
+        for group in table.rows.chunks(width.max(1)) {
             let head = group.first()?;
             if let Some(before) = last.filter(|before| value(head, 0) <= value(before, 0)) {
                 self.report_order(before, head, 0);

@@ -131,11 +131,11 @@ impl<'a> Context<'a> {
         thrust: Stated<'a>,
         curve: Option<Curve>,
     ) -> Option<(Thrust, Value, Value)> {
-        if thrust.ambient() != Some(Ambient::Vacuum) {
+        if thrust.ambient() == Some(Ambient::SeaLevel) {
             self.report(missing_ambient::found(thrust.span, "thrust", "in vacuum"));
         }
         let others = [
-            sheet.get_in("thrust", Ambient::SeaLevel),
+            sheet.get_in("thrust", Ambient::SeaLevel).filter(|other| other.span != thrust.span),
             sheet.get_in("isp", Ambient::SeaLevel),
             sheet.get_in("exhaust_speed", Ambient::SeaLevel),
             sheet.get("mass_flow"),

@@ -21,7 +21,7 @@ pub enum ReadError {
     /// The path leads outside the project's folder, through a link for instance.
     Outside,
     /// In the words of the system.
-    Failed(String),
+    Unreadable(String),
 }
 
 /// The files of a compilation. `trees` has one tree for each file of `sources`, an empty one for a
@@ -41,7 +41,7 @@ impl std::fmt::Display for ReadError {
         f.write_str(match self {
             ReadError::Missing => "there is no such file",
             ReadError::Outside => "it leads outside the project's folder",
-            ReadError::Failed(why) => why,
+            ReadError::Unreadable(why) => why,
         })
     }
 }

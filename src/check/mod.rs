@@ -19,6 +19,7 @@ mod facts;
 mod files;
 mod given;
 mod lines;
+mod mission;
 mod names;
 mod operators;
 mod paths;

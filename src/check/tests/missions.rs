@@ -10,7 +10,7 @@ struct Folder;
 impl Reader for Folder {
     fn read(&self, path: &str) -> Result<Vec<u8>, ReadError> {
         let root = Path::new(env!("CARGO_MANIFEST_DIR"));
-        std::fs::read(root.join(path)).map_err(|error| ReadError::Failed(error.to_string()))
+        std::fs::read(root.join(path)).map_err(|error| ReadError::Unreadable(error.to_string()))
     }
 }
 

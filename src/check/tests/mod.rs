@@ -3,11 +3,13 @@
 use super::{ReadError, Reader, compile};
 use crate::check::Compiled;
 
+mod blocks;
 mod bounds;
 mod engines;
 mod examples;
 mod missions;
 mod model;
+mod mutations;
 mod names;
 mod values;
 

@@ -6,7 +6,7 @@ use crate::check::names::Meaning;
 use crate::check::{BlockId, Context, ScopeId};
 use crate::model::{Air, Drag, FactId, Gravity, Origin, Reserve, Role, Surface, Thrust};
 
-const ROWAN: &str = r#"
+pub(super) const ROWAN: &str = r#"
 bring Earth from builtin
 
 engine Ember {
@@ -58,7 +58,7 @@ vehicle Rowan {
 "#;
 
 /// Runs `look` on the context of a source and on what a name in it means.
-fn with_block<T>(text: &str, name: &str, look: impl FnOnce(&mut Context<'_>, BlockId) -> T) -> T {
+pub(super) fn with_block<T>(text: &str, name: &str, look: impl FnOnce(&mut Context<'_>, BlockId) -> T) -> T {
     let project = files::load("example.wright", &Files(&[("example.wright", text)]));
     assert!(project.diagnostics.is_empty(), "{:?}", project.diagnostics);
     let mut context = Context::new(&project.sources, &project.links, Default::default());

@@ -93,6 +93,7 @@ fn curves_are_checked_row_by_row() {
         ("kind cubic\nmach -> cd\n0 1\n1 2", vec!["unknown-word"]),
         ("0 1\n1 2", vec!["missing-fact"]),
         ("mach -> cd", vec!["curve-too-short"]),
+        ("mach, altitude [km] -> cd", vec!["curve-too-short"]),
     ] {
         assert_eq!(curve(rows), expected, "{rows}");
     }
