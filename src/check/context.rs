@@ -1,6 +1,7 @@
 //! What a compilation knows while it goes on.
 
 use std::collections::{BTreeMap, BTreeSet, HashMap};
+use std::sync::Arc;
 
 use super::blocks::Results;
 use super::changed::Changes;
@@ -59,7 +60,7 @@ pub(crate) struct Context<'a> {
 
     pub(super) worlds: Results<World>,
     pub(super) engines: Results<Engine>,
-    pub(super) curves: Results<Curve>,
+    pub(super) curves: Results<Arc<Curve>>,
     pub(super) stages: Results<StageFacts>,
     pub(super) vehicles: Results<Vehicle>,
     /// Engines that say nothing about sea level.

@@ -1,5 +1,7 @@
 //! Curves: a header, settings, and rows that make a function of one or two quantities.
 
+use std::sync::Arc;
+
 use super::sheet::Key;
 use super::table::{Row, Table, TableColumn};
 use super::{BlockId, Context};
@@ -15,11 +17,11 @@ const KEYS: &[Key] = &[
 
 impl<'a> Context<'a> {
     /// The checked curve, worked out on first use; None where it has errors, which have been reported.
-    pub(crate) fn curve(&mut self, block: BlockId) -> Option<Curve> {
+    pub(crate) fn curve(&mut self, block: BlockId) -> Option<Arc<Curve>> {
         self.once_checked(block, |context| &mut context.curves, Context::check_curve)
     }
 
-    fn check_curve(&mut self, block: BlockId) -> Option<Curve> {
+    fn check_curve(&mut self, block: BlockId) -> Option<Arc<Curve>> {
         let mut header = None;
         let mut rows = Vec::new();
         let mut from = None;
@@ -71,7 +73,7 @@ impl<'a> Context<'a> {
         let (points, values) = axes_and_values?;
         let (output, inputs) = table.columns.split_last()?;
         let axes = inputs.iter().zip(points).map(|(column, points)| axis(column, points)).collect();
-        Some(Curve {
+        Some(Arc::new(Curve {
             name: sheet.name.to_string(),
             place: self.place(sheet.span),
             smoothness: smoothness?,
@@ -80,7 +82,7 @@ impl<'a> Context<'a> {
             output: output.name.clone(),
             output_dimension: output.dimension,
             values,
-        })
+        }))
     }
 
     /// Points and values of a curve over one quantity.

@@ -1,5 +1,7 @@
 //! Engines: the least set of facts, what follows from it, and what contradicts it.
 
+use std::sync::Arc;
+
 use super::blocks::Bound;
 use super::engine_lines::Line;
 use super::engine_solve::{self, Slot};
@@ -95,7 +97,7 @@ impl<'a> Context<'a> {
     }
 
     /// A thrust that names a curve: the curve, or None where that has errors.
-    fn thrust_curve(&mut self, sheet: &Sheet<'a>) -> Option<(Stated<'a>, Option<Curve>)> {
+    fn thrust_curve(&mut self, sheet: &Sheet<'a>) -> Option<(Stated<'a>, Option<Arc<Curve>>)> {
         let stated = sheet.get_in("thrust", Ambient::Vacuum).or_else(|| sheet.get("thrust"))?;
         let name = stated.name().filter(|name| self.find_given(stated.scope, &name.text).is_none())?;
         let curve = self.find_block(stated.scope, BlockKind::Curve, name).and_then(|curve| self.curve(curve));
@@ -129,7 +131,7 @@ impl<'a> Context<'a> {
         &mut self,
         sheet: &Sheet<'a>,
         thrust: Stated<'a>,
-        curve: Option<Curve>,
+        curve: Option<Arc<Curve>>,
     ) -> Option<(Thrust, Value, Value)> {
         if thrust.ambient() == Some(Ambient::SeaLevel) {
             self.report(missing_ambient::found(thrust.span, "thrust", "in vacuum"));

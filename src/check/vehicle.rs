@@ -209,13 +209,13 @@ impl<'a> Context<'a> {
         }
     }
 
-    /// Over `mach`, or over `mach` and one of altitude and angle of attack; the coefficient is a
+    /// Over `mach`, or over `mach` first and one of altitude and angle of attack; the coefficient is a
     /// pure number, nowhere below zero.
     fn check_drag_curve(&mut self, stated: &Stated<'a>, curve: &Curve) -> Option<()> {
         let axes: Vec<_> = curve.axes.iter().map(|axis| (axis.name.as_str(), axis.dimension)).collect();
         let fits = match axes.as_slice() {
             [("mach", Dimension::NONE)] => true,
-            [("mach", Dimension::NONE), other] | [other, ("mach", Dimension::NONE)] => {
+            [("mach", Dimension::NONE), other] => {
                 [("altitude", Dimension::LENGTH), ("angle_of_attack", Dimension::ANGLE)].contains(other)
             }
             _ => false,

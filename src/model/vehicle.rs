@@ -1,7 +1,9 @@
 //! Engines, stages and how they are put together.
 
+use std::sync::Arc;
+
 use schemars::JsonSchema;
-use serde::Serialize;
+use serde::{Serialize, Serializer};
 
 use super::{Place, Value};
 use crate::quantity::Dimension;
@@ -90,7 +92,11 @@ pub enum Thrust {
     /// In vacuum at full throttle, N.
     Steady { vacuum: Value },
     /// In vacuum over the time since it was lit, s → N.
-    Curve { curve: Curve },
+    Curve {
+        #[serde(serialize_with = "shared")]
+        #[schemars(with = "Curve")]
+        curve: Arc<Curve>,
+    },
 }
 
 #[derive(Clone, Debug, PartialEq, Serialize, JsonSchema)]
@@ -104,9 +110,16 @@ pub enum Drag {
     },
     /// Coefficient over `mach`, or over `mach` and `altitude` or `angle_of_attack`.
     Curve {
-        curve: Curve,
+        #[serde(serialize_with = "shared")]
+        #[schemars(with = "Curve")]
+        curve: Arc<Curve>,
         reference_area: Value,
     },
+}
+
+/// A long curve may belong to many engines or vehicles, which then share it.
+fn shared<S: Serializer>(curve: &Arc<Curve>, serializer: S) -> Result<S::Ok, S::Error> {
+    curve.as_ref().serialize(serializer)
 }
 
 /// A table of one quantity over one or two others, in SI.

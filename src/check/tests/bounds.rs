@@ -99,3 +99,18 @@ fn many_files_in_a_row_are_followed() {
     let compiled = compile("f0.wright", &Files(&files));
     assert_eq!(codes(&compiled), ["file-not-read"]);
 }
+
+#[test]
+fn a_long_curve_is_shared_by_all_that_use_it() {
+    let mut text = "curve C {\n time [s] -> thrust [kN]\n".to_string();
+    for n in 0..20_000 {
+        let _ = writeln!(text, " {n} 0.5");
+    }
+    text.push_str("}\n");
+    for n in 0..5_000 {
+        let _ = writeln!(text, "engine E{n} {{ thrust C in vacuum; isp 300 s in vacuum }}");
+        let _ = writeln!(text, "stage S{n} {{ engines 1 of E{n}; dry 1 kg; propellant 3399 kg }}");
+        let _ = writeln!(text, "vehicle V{n} {{ stack S{n} }}");
+    }
+    assert!(timed(&text).is_empty());
+}
