@@ -58,8 +58,6 @@ pub enum Cause {
     RanDry { part: usize },
     /// The step became too small, or a number was not finite.
     Numerical { detail: String },
-    /// Stopped from outside.
-    Interrupted,
 }
 
 /// Frame of the ledger's speed.

@@ -21,7 +21,7 @@ type Flown<T> = Result<T, Failure>;
 /// same thing sets the throttle. A phase is one segment or several.
 pub struct Run<'p, 's, S> {
     plan: &'p Plan<S>,
-    settings: &'s Settings<'s>,
+    settings: &'s Settings,
     motion: Motion<'p, S>,
     time: S,
     position: Vector<S>,
@@ -50,7 +50,7 @@ enum After {
 }
 
 impl<'p, 's, S: Scalar> Run<'p, 's, S> {
-    pub fn new(plan: &'p Plan<S>, settings: &'s Settings<'s>, frame: Frame) -> Self {
+    pub fn new(plan: &'p Plan<S>, settings: &'s Settings, frame: Frame) -> Self {
         Run {
             plan,
             settings,

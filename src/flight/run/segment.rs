@@ -1,7 +1,5 @@
 //! One segment, step by step.
 
-use std::sync::atomic::Ordering;
-
 use super::{After, Flown, Run};
 use crate::flight::integrate::{StepFailure, Stepper, Tolerance};
 use crate::flight::motion::COLUMNS;
@@ -36,9 +34,10 @@ impl<S: Scalar> Run<'_, '_, S> {
         let mut values = watches.values(&Look::new(&motion, self.time, &state));
         let limit = stops.pop().unwrap_or(self.time);
         while self.time.real() < limit.real() {
-            if let Err(cause) = self.may_go_on(&stepper) {
+            if stepper.steps() > MOST_STEPS {
                 self.settle(&stepper);
-                return Err(self.failure(cause));
+                let after = (self.time - self.motion.phase_start).real();
+                return Err(self.failure(Cause::NeverEnds { after }));
             }
             if let Err(failure) = stepper.step(&mut motion, limit) {
                 self.settle(&stepper);
@@ -74,16 +73,6 @@ impl<S: Scalar> Run<'_, '_, S> {
         match self.time.real() >= self.motion.phase_start.real() + LONGEST_PHASE {
             true => Err(self.failure(Cause::NeverEnds { after: LONGEST_PHASE })),
             false => Ok(After::Switch),
-        }
-    }
-
-    fn may_go_on(&self, stepper: &Stepper<S>) -> Result<(), Cause> {
-        if stepper.steps() > MOST_STEPS {
-            return Err(Cause::NeverEnds { after: (self.time - self.motion.phase_start).real() });
-        }
-        match self.settings.stop.is_some_and(|stop| stop.load(Ordering::Relaxed)) {
-            true => Err(Cause::Interrupted),
-            false => Ok(()),
         }
     }
 

@@ -1,0 +1,261 @@
+//! What a mission asks for: demands, figures, aims, objective, headline.
+
+use std::collections::BTreeMap;
+
+use super::Site;
+use super::formula::{Built, Speaks};
+use crate::check::{Context, Inherited, ScopeId};
+use crate::diagnostics::codes::{duplicate_name, empty_band, objective_without_knob, unknown_name};
+use crate::model::{Aim, Demand, Figure, Formula, Headline, Knob, Objective, Requirement};
+use crate::quantity::Dimension;
+use crate::source::Span;
+use crate::syntax::{self, Because, Expr, Path, Statement};
+
+/// What a mission asks for.
+#[derive(Default)]
+pub(super) struct Asked {
+    pub demands: Vec<Demand>,
+    pub figures: Vec<Figure>,
+    pub aims: Vec<Aim>,
+    pub knobs: Vec<Knob>,
+    pub objective: Option<Objective>,
+    pub headline: Option<Headline>,
+}
+
+impl<'a> Context<'a> {
+    pub(super) fn asked(&mut self, site: &mut Site<'a>, lines: &[Inherited<'a>]) -> Option<Asked> {
+        let mut asked = Asked::default();
+        let mut sound = true;
+        let mut names: BTreeMap<&'a str, Span> = BTreeMap::new();
+        // Figures first: demands and aims may name them, wherever they stand.
+        for line in lines {
+            if let Statement::Figure { name, value } = &line.line.statement {
+                let built = self.figure(site, line, name, value);
+                sound &= built.is_some();
+                asked.figures.extend(built);
+            }
+        }
+        for line in lines {
+            let because = line.line.because.as_ref();
+            let name = match &line.line.statement {
+                Statement::Demand { name: Some(name), .. } | Statement::Figure { name, .. } => Some(name),
+                _ => None,
+            };
+            if let Some(name) = name
+                && let Some(first) = names.insert(&name.text, name.span)
+            {
+                self.report(duplicate_name::found(name.span, &name.text, first));
+            }
+            match &line.line.statement {
+                Statement::Demand { name, quantity, requirement } => {
+                    let demand = self.demand(site, line.scope, (name.as_ref(), quantity, requirement), because);
+                    sound &= demand.is_some();
+                    asked.demands.extend(demand);
+                }
+                Statement::Aim { quantity, target, within } => {
+                    let aim = self.aim(site, line.scope, (quantity, target, within), because);
+                    sound &= aim.is_some();
+                    asked.aims.extend(aim);
+                }
+                Statement::Knob { path, low, high } => {
+                    let knob = self.knob(site, line.scope, (path, low, high));
+                    sound &= knob.is_some();
+                    asked.knobs.extend(knob);
+                }
+                Statement::Objective { most, quantity } => {
+                    let built = self.formula(site, line.scope, quantity, Speaks::Whole);
+                    sound &= built.is_some();
+                    asked.objective = built.map(|built| Objective {
+                        most: *most,
+                        written: self.text(quantity.span).to_string(),
+                        unit: self.shown_in(site, line.scope, quantity, &built),
+                        dimension: built.dimension,
+                        quantity: built.formula,
+                    });
+                    if !lines.iter().any(|line| matches!(line.line.statement, Statement::Knob { .. })) {
+                        self.report(objective_without_knob::found(line.line.span));
+                    }
+                }
+                Statement::Headline(path) => {
+                    let headline = self.headline(site, line.scope, path);
+                    sound &= headline.is_some();
+                    asked.headline = headline;
+                }
+                _ => {}
+            }
+        }
+        sound.then_some(asked)
+    }
+
+    fn figure(
+        &mut self,
+        site: &mut Site<'a>,
+        line: &Inherited<'a>,
+        name: &syntax::Name,
+        value: &Expr,
+    ) -> Option<Figure> {
+        let built = self.formula(site, line.scope, value, Speaks::Whole)?;
+        let unit = self.shown_in(site, line.scope, value, &built);
+        site.figures.push((name.text.clone(), built.dimension, unit.clone()));
+        Some(Figure {
+            name: name.text.clone(),
+            written: self.text(value.span).to_string(),
+            value: built.formula,
+            dimension: built.dimension,
+            unit,
+            because: line.line.because.as_ref().map(|because| because.text.text.clone()),
+            place: self.place(line.line.span),
+        })
+    }
+
+    fn demand(
+        &mut self,
+        site: &Site<'a>,
+        scope: ScopeId,
+        (name, quantity, requirement): (Option<&syntax::Name>, &Expr, &syntax::Requirement),
+        because: Option<&Because>,
+    ) -> Option<Demand> {
+        let written = self.text(quantity.span).to_string();
+        let built = self.formula(site, scope, quantity, Speaks::Whole);
+        let name = name.map_or_else(|| written.clone(), |name| name.text.clone());
+        let dimension = built.as_ref().map(|built| built.dimension);
+        let mut bound = |expr: &Expr, part: &str| {
+            let what = format!("the limit of `{written}`");
+            let path = if part.is_empty() { format!("{name}.limit") } else { format!("{name}.{part}") };
+            self.limit(site, scope, (&path, expr), Speaks::Whole, (dimension?, &what), because)
+        };
+        let (requirement, shown) = match requirement {
+            syntax::Requirement::AtLeast(limit) => {
+                (bound(limit, "").map(|limit| Requirement::AtLeast { limit }), limit)
+            }
+            syntax::Requirement::AtMost(limit) => {
+                (bound(limit, "").map(|limit| Requirement::AtMost { limit }), limit)
+            }
+            syntax::Requirement::Between(low, high) => {
+                let bounds = bound(low, "low").zip(bound(high, "high"));
+                if let Some((low_bound, high_bound)) = &bounds
+                    && let (Some(from), Some(to)) = (fixed(low_bound), fixed(high_bound))
+                    && from > to
+                {
+                    self.report(empty_band::found(low.span.to(high.span), "the lower end is above the upper one"));
+                    return None;
+                }
+                (bounds.map(|(low, high)| Requirement::Between { low, high }), low)
+            }
+            syntax::Requirement::Within { target, tolerance } => {
+                let bounds = bound(target, "target").zip(bound(tolerance, "tolerance"));
+                if let Some((_, tolerance_bound)) = &bounds {
+                    self.positive(tolerance_bound, tolerance.span)?;
+                }
+                (bounds.map(|(target, tolerance)| Requirement::Within { target, tolerance }), target)
+            }
+        };
+        let built = built?;
+        let unit = self.unit_of(scope, shown, built.dimension);
+        let unit = if unit.is_empty() { self.shown_in(site, scope, quantity, &built) } else { unit };
+        Some(Demand {
+            name,
+            written,
+            quantity: built.formula,
+            dimension: built.dimension,
+            unit,
+            requirement: requirement?,
+            because: because.map(|because| because.text.text.clone()),
+            place: self.place(quantity.span),
+        })
+    }
+
+    fn aim(
+        &mut self,
+        site: &Site<'a>,
+        scope: ScopeId,
+        (quantity, target, within): (&Expr, &Expr, &Expr),
+        because: Option<&Because>,
+    ) -> Option<Aim> {
+        let written = self.text(quantity.span).to_string();
+        let built = self.formula(site, scope, quantity, Speaks::Whole)?;
+        let what = format!("the target of `{written}`");
+        let path = format!("aim.{}", written.replace(' ', "_"));
+        let want = (built.dimension, what.as_str());
+        let aimed = self.limit(site, scope, (&path, target), Speaks::Whole, want, because);
+        let path = format!("{path}.within");
+        let want = (built.dimension, "the tolerance of the aim");
+        let tolerance = self.limit(site, scope, (&path, within), Speaks::Whole, want, because);
+        let (aimed, tolerance) = (aimed?, tolerance?);
+        self.positive(&tolerance, within.span)?;
+        let unit = self.unit_of(scope, target, built.dimension);
+        let unit = if unit.is_empty() { self.shown_in(site, scope, quantity, &built) } else { unit };
+        Some(Aim {
+            written,
+            quantity: built.formula,
+            target: aimed,
+            tolerance,
+            dimension: built.dimension,
+            unit,
+            place: self.place(quantity.span),
+        })
+    }
+
+    fn positive(&mut self, tolerance: &Formula, span: Span) -> Option<()> {
+        if fixed(tolerance).is_none_or(|tolerance| tolerance > 0.0) {
+            return Some(());
+        }
+        self.report(empty_band::found(span, "the tolerance is not above zero"));
+        None
+    }
+
+    /// The unit in which to show a quantity: that of a fact in it, else the trade's.
+    fn shown_in(&mut self, site: &Site<'a>, scope: ScopeId, expr: &Expr, built: &Built) -> String {
+        let unit = self.unit_of(scope, expr, built.dimension);
+        if !unit.is_empty() {
+            return unit;
+        }
+        let fact = match &built.formula {
+            Formula::Fact { value } => self.facts.get(value.fact.0 as usize).map(|fact| fact.unit.clone()),
+            Formula::Figure { index } => site.figures.get(*index as usize).map(|(_, _, unit)| unit.clone()),
+            _ => None,
+        };
+        let customary = built.customary.filter(|unit| {
+            crate::quantity::UnitTable::builtin().parse(unit).is_ok_and(|unit| unit.dimension == built.dimension)
+        });
+        fact.or(customary.map(str::to_string)).unwrap_or_else(|| si_unit(built.dimension))
+    }
+
+    fn headline(&mut self, site: &Site<'a>, scope: ScopeId, path: &Path) -> Option<Headline> {
+        let text = self.text(path.span);
+        if let Some(index) = site.figures.iter().position(|(name, ..)| name == text) {
+            return Some(Headline::Figure { index: index as u32 });
+        }
+        if let Some(fact) = self.fact_at(site, scope, path) {
+            return Some(Headline::Fact { fact });
+        }
+        self.report(unknown_name::found(path.span, "a figure or a fact", text, None));
+        None
+    }
+}
+
+/// The value of a formula that is a number or a fact.
+fn fixed(formula: &Formula) -> Option<f64> {
+    match formula {
+        Formula::Number { si } => Some(*si),
+        Formula::Fact { value } => Some(value.si),
+        _ => None,
+    }
+}
+
+/// A unit of the SI for any dimension, as a source would write it.
+fn si_unit(dimension: Dimension) -> String {
+    let exponents = [
+        ("kg", dimension.mass),
+        ("m", dimension.length),
+        ("s", dimension.time),
+        ("K", dimension.temperature),
+        ("rad", dimension.angle),
+    ];
+    let factors: Vec<String> = exponents
+        .into_iter()
+        .filter(|(_, exponent)| *exponent != 0)
+        .map(|(symbol, exponent)| if exponent == 1 { symbol.to_string() } else { format!("{symbol}^{exponent}") })
+        .collect();
+    factors.join("*")
+}
