@@ -48,7 +48,8 @@ impl<'a> Context<'a> {
             }
             match &line.line.statement {
                 Statement::Demand { name, quantity, requirement } => {
-                    let demand = self.demand(site, line.scope, (name.as_ref(), quantity, requirement), because);
+                    let demand =
+                        self.demand(site, line.scope, (name.as_ref(), quantity, requirement), because);
                     sound &= demand.is_some();
                     asked.demands.extend(demand);
                 }
@@ -137,7 +138,10 @@ impl<'a> Context<'a> {
                     && let (Some(from), Some(to)) = (fixed(low_bound), fixed(high_bound))
                     && from > to
                 {
-                    self.report(empty_band::found(low.span.to(high.span), "the lower end is above the upper one"));
+                    self.report(empty_band::found(
+                        low.span.to(high.span),
+                        "the lower end is above the upper one",
+                    ));
                     return None;
                 }
                 (bounds.map(|(low, high)| Requirement::Between { low, high }), low)
@@ -216,7 +220,9 @@ impl<'a> Context<'a> {
             _ => None,
         };
         let customary = built.customary.filter(|unit| {
-            crate::quantity::UnitTable::builtin().parse(unit).is_ok_and(|unit| unit.dimension == built.dimension)
+            crate::quantity::UnitTable::builtin()
+                .parse(unit)
+                .is_ok_and(|unit| unit.dimension == built.dimension)
         });
         fact.or(customary.map(str::to_string)).unwrap_or_else(|| si_unit(built.dimension))
     }
@@ -255,7 +261,11 @@ fn si_unit(dimension: Dimension) -> String {
     let factors: Vec<String> = exponents
         .into_iter()
         .filter(|(_, exponent)| *exponent != 0)
-        .map(|(symbol, exponent)| if exponent == 1 { symbol.to_string() } else { format!("{symbol}^{exponent}") })
+        .map(
+            |(symbol, exponent)| {
+                if exponent == 1 { symbol.to_string() } else { format!("{symbol}^{exponent}") }
+            },
+        )
         .collect();
     factors.join("*")
 }

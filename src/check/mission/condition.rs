@@ -69,7 +69,12 @@ impl<'a> Context<'a> {
                 let part = self.part(site, name)?;
                 if site.vehicle.parts[part].propulsion.is_none() {
                     let why = format!("`{}` carries no propellant", name.text);
-                    self.report(absent_quantity::found(condition.span, self.text(condition.span), &why, None));
+                    self.report(absent_quantity::found(
+                        condition.span,
+                        self.text(condition.span),
+                        &why,
+                        None,
+                    ));
                     return None;
                 }
                 Some(Condition::Spent { part: part as u32 })

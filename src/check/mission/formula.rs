@@ -39,7 +39,13 @@ pub(super) enum Speaks {
 
 impl<'a> Context<'a> {
     /// A formula that may speak of `speaks`; what else it speaks of is reported.
-    pub(super) fn formula(&mut self, site: &Site<'a>, scope: ScopeId, expr: &Expr, speaks: Speaks) -> Option<Built> {
+    pub(super) fn formula(
+        &mut self,
+        site: &Site<'a>,
+        scope: ScopeId,
+        expr: &Expr,
+        speaks: Speaks,
+    ) -> Option<Built> {
         let built = self.deeper(1, expr.span, |context| context.build(site, scope, expr))?;
         match (speaks, built.whole, built.reading) {
             (Speaks::Constant | Speaks::Instant, Some(span), _) => {
@@ -125,7 +131,10 @@ impl<'a> Context<'a> {
                     whole: built.iter().find_map(|built| built.whole),
                     customary: built.iter().find_map(|built| built.customary),
                     dimension,
-                    formula: Formula::Call { function, of: built.into_iter().map(|built| built.formula).collect() },
+                    formula: Formula::Call {
+                        function,
+                        of: built.into_iter().map(|built| built.formula).collect(),
+                    },
                 })
             }
             ExprKind::Peak { quantity, phase } => {
@@ -191,7 +200,9 @@ impl<'a> Context<'a> {
         if let Some(quantity) = Quantity::ALL.iter().copied().find(|quantity| quantity.name() == name.text) {
             if quantity == Quantity::Left {
                 let why = "propellant is left in a part of the vehicle";
-                self.report(absent_quantity::found(name.span, &name.text, why, None).help("write `Sorrel.left`"));
+                self.report(
+                    absent_quantity::found(name.span, &name.text, why, None).help("write `Sorrel.left`"),
+                );
                 return None;
             }
             self.exists(site, name.span, quantity)?;
@@ -201,10 +212,16 @@ impl<'a> Context<'a> {
             let (si, dimension) = self.facts.get(fact.0 as usize).map(|fact| (fact.si, fact.dimension))?;
             return Some(Built::plain(self.fact_formula(Value { si, fact }), dimension));
         }
-        let near = self.nearest(&name.text, |_| Quantity::ALL.iter().map(|quantity| quantity.name()).collect());
+        let near =
+            self.nearest(&name.text, |_| Quantity::ALL.iter().map(|quantity| quantity.name()).collect());
         match near {
             Some(near) => {
-                self.report(unknown_name::found(name.span, "a flight quantity", &name.text, Some((near, None))));
+                self.report(unknown_name::found(
+                    name.span,
+                    "a flight quantity",
+                    &name.text,
+                    Some((near, None)),
+                ));
             }
             None => self.unknown_in_expression(scope, name),
         }
@@ -232,7 +249,9 @@ impl<'a> Context<'a> {
     fn exists(&mut self, site: &Site<'a>, span: Span, quantity: Quantity) -> Option<()> {
         let world = &site.world;
         let why = match quantity.kind() {
-            QuantityKind::Orbital if matches!(world.gravity, Gravity::Uniform { .. }) => "its gravity is uniform",
+            QuantityKind::Orbital if matches!(world.gravity, Gravity::Uniform { .. }) => {
+                "its gravity is uniform"
+            }
             QuantityKind::Round if matches!(world.surface, Surface::Flat) => "it is flat",
             QuantityKind::Air if world.air == crate::model::Air::None => "it has no air",
             _ => return Some(()),

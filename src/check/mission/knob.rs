@@ -7,12 +7,18 @@ use crate::model::{FactId, Knob, Origin};
 use crate::syntax::{Expr, Path};
 
 impl<'a> Context<'a> {
-    pub(super) fn knob(&mut self, site: &Site<'a>, scope: ScopeId, knob: (&Path, &Expr, &Expr)) -> Option<Knob> {
+    pub(super) fn knob(
+        &mut self,
+        site: &Site<'a>,
+        scope: ScopeId,
+        knob: (&Path, &Expr, &Expr),
+    ) -> Option<Knob> {
         let (path, low, high) = knob;
         let Some(id) = self.fact_at(site, scope, path) else {
             self.report(
-                unknown_name::found(path.span, "a fact of this mission", self.text(path.span), None)
-                    .help("a knob frees a fact that is stated: a given, or an address such as `Sorrel.propellant`"),
+                unknown_name::found(path.span, "a fact of this mission", self.text(path.span), None).help(
+                    "a knob frees a fact that is stated: a given, or an address such as `Sorrel.propellant`",
+                ),
             );
             return None;
         };

@@ -68,7 +68,8 @@ impl<'a> Context<'a> {
         let mission = self.mission_within(block);
         self.leave();
         let facts = self.facts_of(block);
-        let broken = self.definition(block).block.lines.iter().any(|line| matches!(line.statement, Statement::Broken));
+        let broken =
+            self.definition(block).block.lines.iter().any(|line| matches!(line.statement, Statement::Broken));
         let clean = self.diagnostics[before.min(self.diagnostics.len())..]
             .iter()
             .all(|found| found.severity() == crate::diagnostics::Severity::Warning);
@@ -96,8 +97,10 @@ impl<'a> Context<'a> {
             }
             true
         });
-        let vehicle = self.named_block(block, sheet.get("flies"), BlockKind::Vehicle, "its vehicle", "flies  Rowan");
-        let world = self.named_block(block, sheet.get("within"), BlockKind::World, "its world", "within  Earth");
+        let vehicle =
+            self.named_block(block, sheet.get("flies"), BlockKind::Vehicle, "its vehicle", "flies  Rowan");
+        let world =
+            self.named_block(block, sheet.get("within"), BlockKind::World, "its world", "within  Earth");
         let payload = match sheet.get("payload") {
             Some(stated) => {
                 let value = self.number_of(&stated, "payload", Dimension::MASS, "the payload");
@@ -124,7 +127,11 @@ impl<'a> Context<'a> {
         let start = match start {
             Some(line) => self.start(&site, line),
             None => {
-                self.missing(block, "its start", "start  pad latitude 58.2 deg longitude -11.6 deg altitude 45 m");
+                self.missing(
+                    block,
+                    "its start",
+                    "start  pad latitude 58.2 deg longitude -11.6 deg altitude 45 m",
+                );
                 None
             }
         };
@@ -217,10 +224,16 @@ impl<'a> Context<'a> {
     fn part(&mut self, site: &Site<'a>, name: &Name) -> Option<usize> {
         let found = site.part(&name.text);
         if found.is_none() {
-            let near = self.nearest(&name.text, |_| site.vehicle.parts.iter().map(|part| part.name.as_str()).collect());
+            let near = self
+                .nearest(&name.text, |_| site.vehicle.parts.iter().map(|part| part.name.as_str()).collect());
             let near = near.map(str::to_string);
             let kind = format!("a part of `{}`", site.vehicle.name);
-            self.report(unknown_name::found(name.span, &kind, &name.text, near.as_deref().map(|near| (near, None))));
+            self.report(unknown_name::found(
+                name.span,
+                &kind,
+                &name.text,
+                near.as_deref().map(|near| (near, None)),
+            ));
         }
         found
     }

@@ -5,8 +5,8 @@ use super::Site;
 use super::phase::Checked;
 use crate::check::Context;
 use crate::diagnostics::codes::{
-    already_lit, already_shed, burnt_too_early, endless_phase, nothing_throttles, shed_while_burning, still_carried,
-    throttle_out_of_range, too_many_restarts, unused_part,
+    already_lit, already_shed, burnt_too_early, endless_phase, nothing_throttles, shed_while_burning,
+    still_carried, throttle_out_of_range, too_many_restarts, unused_part,
 };
 use crate::model::{Condition, Engine, Part, Role};
 use crate::source::Span;
@@ -44,7 +44,8 @@ impl<'a> Context<'a> {
         let burns = phase.model.burns.iter().map(|burn| burn.part as usize).zip(&phase.burns);
         let lights = phase.model.lights.iter().map(|light| light.part as usize).zip(&phase.lights);
         let mut lit = Vec::new();
-        for (light, (part, (span, hot))) in burns.map(|one| (false, one)).chain(lights.map(|one| (true, one))) {
+        for (light, (part, (span, hot))) in burns.map(|one| (false, one)).chain(lights.map(|one| (true, one)))
+        {
             let name = &parts[part].name;
             if let Some(shed) = state.shed[part] {
                 self.report(already_shed::found(*span, name, shed));
@@ -72,7 +73,12 @@ impl<'a> Context<'a> {
     }
 
     fn check_throttle(&mut self, parts: &[Part], phase: &Checked) {
-        let lit = phase.model.burns.iter().map(|burn| burn.part).chain(phase.model.lights.iter().map(|light| light.part));
+        let lit = phase
+            .model
+            .burns
+            .iter()
+            .map(|burn| burn.part)
+            .chain(phase.model.lights.iter().map(|light| light.part));
         let engines: Vec<&Engine> = lit.filter_map(|part| engine(&parts[part as usize])).collect();
         if let Some(hold) = &phase.model.hold
             && !engines.is_empty()
@@ -106,7 +112,11 @@ impl<'a> Context<'a> {
                 Condition::Spent { part } => Some(&parts[*part as usize].name),
                 _ => None,
             });
-            self.report(endless_phase::found(phase.until, &phase.model.name, part.map_or("", String::as_str)));
+            self.report(endless_phase::found(
+                phase.until,
+                &phase.model.name,
+                part.map_or("", String::as_str),
+            ));
         }
     }
 

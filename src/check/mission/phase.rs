@@ -4,7 +4,8 @@ use super::formula::Speaks;
 use super::{PhaseBlock, Site};
 use crate::check::{Bound, Context, ScopeId, Want};
 use crate::diagnostics::codes::{
-    burn_or_coast, engine_count, foreign_fact, hold_not_by_throttle, missing_fact, throttle_out_of_range, unknown_fact,
+    burn_or_coast, engine_count, foreign_fact, hold_not_by_throttle, missing_fact, throttle_out_of_range,
+    unknown_fact,
 };
 use crate::model::{Burn, Condition, Formula, Hold, Light, Phase, Quantity, Shed, Steer, Value};
 use crate::quantity::Dimension;
@@ -56,9 +57,13 @@ impl<'a> Context<'a> {
             (None, None, None) if !broken => self.report(burn_or_coast::neither(block.name.span, name)),
             _ => {}
         }
-        let burns: Vec<_> = lines.burns.iter().map(|(burn, line)| self.burn(site, scope, name, burn, line)).collect();
-        let lights: Vec<_> =
-            lines.lights.iter().map(|(part, at, _, line)| self.light_line(site, scope, name, part, at, line)).collect();
+        let burns: Vec<_> =
+            lines.burns.iter().map(|(burn, line)| self.burn(site, scope, name, burn, line)).collect();
+        let lights: Vec<_> = lines
+            .lights
+            .iter()
+            .map(|(part, at, _, line)| self.light_line(site, scope, name, part, at, line))
+            .collect();
         let steer = match lines.steer {
             Some((steer, line)) => self.steer(site, scope, name, steer, line.because.as_ref()),
             None if lines.coast.is_some() => Some(Steer::Keep),
@@ -69,8 +74,10 @@ impl<'a> Context<'a> {
                 None
             }
         };
-        let throttle = lines.throttle.map(|(expr, line)| self.throttle(scope, name, expr, line.because.as_ref()));
-        let hold = lines.hold.map(|(quantity, limit, line)| self.hold(site, scope, name, (quantity, limit), line));
+        let throttle =
+            lines.throttle.map(|(expr, line)| self.commanded(scope, name, expr, line.because.as_ref()));
+        let hold =
+            lines.hold.map(|(quantity, limit, line)| self.hold(site, scope, name, (quantity, limit), line));
         let until = match lines.until {
             Some((conditions, line)) => self.until(site, scope, name, conditions, line),
             None if broken => None,
@@ -202,7 +209,13 @@ impl<'a> Context<'a> {
         Some(part)
     }
 
-    fn throttle(&mut self, scope: ScopeId, phase: &str, expr: &Expr, because: Option<&Because>) -> Option<Value> {
+    fn commanded(
+        &mut self,
+        scope: ScopeId,
+        phase: &str,
+        expr: &Expr,
+        because: Option<&Because>,
+    ) -> Option<Value> {
         let path = format!("{phase}.throttle");
         let value = self.fact(scope, &path, expr, Want::PERCENT, "the throttle", because)?;
         if value.si <= 0.0 {
@@ -224,7 +237,10 @@ impl<'a> Context<'a> {
         let held = match &built.formula {
             Formula::Reading { reading } => matches!(
                 reading.quantity,
-                Quantity::Acceleration | Quantity::AxialAcceleration | Quantity::ThrustToWeight | Quantity::Thrust
+                Quantity::Acceleration
+                    | Quantity::AxialAcceleration
+                    | Quantity::ThrustToWeight
+                    | Quantity::Thrust
             ),
             _ => false,
         };

@@ -58,9 +58,13 @@ impl<'a> Context<'a> {
                     self.fact(line.scope, &path, value, *dimension, &what, line.line.because.as_ref())
                 }
                 // A flat world has no angles.
-                None if *kind == StartKind::Pad && flat => {
-                    Some(self.default(&path, 0.0, if *dimension == Dimension::ANGLE { "deg" } else { "m" }, *dimension, *kind_span))
-                }
+                None if *kind == StartKind::Pad && flat => Some(self.default(
+                    &path,
+                    0.0,
+                    if *dimension == Dimension::ANGLE { "deg" } else { "m" },
+                    *dimension,
+                    *kind_span,
+                )),
                 None => {
                     self.report(missing_fact::beside(*kind_span, &format!("`{name}`"), example));
                     None

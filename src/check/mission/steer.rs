@@ -64,7 +64,9 @@ impl<'a> Context<'a> {
     /// A pitch beyond the vertical is a heading the other way round.
     fn steep(&mut self, law: &syntax::PitchLaw, pitch: &PitchLaw) -> Option<()> {
         match (law, pitch) {
-            (syntax::PitchLaw::Fixed(expr), PitchLaw::Fixed { pitch }) => self.angle_of(pitch, 90.0, expr, "a pitch"),
+            (syntax::PitchLaw::Fixed(expr), PitchLaw::Fixed { pitch }) => {
+                self.angle_of(pitch, 90.0, expr, "a pitch")
+            }
             (syntax::PitchLaw::Rate { from: expr, .. }, PitchLaw::Rate { from, .. })
             | (syntax::PitchLaw::Over { from: expr, .. }, PitchLaw::Over { from, .. }) => {
                 self.angle_of(from, 90.0, expr, "a pitch")
