@@ -16,11 +16,12 @@ pub(crate) struct Key {
     arguments: &'static [&'static str],
     ambient: bool,
     range: bool,
+    instant: bool,
 }
 
 impl Key {
     pub(crate) const fn new(name: &'static str, example: &'static str) -> Self {
-        Key { name, example, words: &[], arguments: &[], ambient: false, range: false }
+        Key { name, example, words: &[], arguments: &[], ambient: false, range: false, instant: false }
     }
 
     /// With one of these words before or instead of a value.
@@ -35,6 +36,11 @@ impl Key {
     /// With `in vacuum` or `at sea_level`.
     pub(crate) const fn ambient(self) -> Self {
         Key { ambient: true, ..self }
+    }
+
+    /// With an instant of time as its value.
+    pub(crate) const fn instant(self) -> Self {
+        Key { instant: true, ..self }
     }
 
     /// With `..` and a second value.
@@ -161,8 +167,8 @@ impl<'a> Context<'a> {
         if let (Some((_, span)), false) = (setting.ambient, key.ambient) {
             wrong.push((span, format!("`{}`", self.text(span))));
         }
-        if let Some(Operand::Instant(span)) = setting.value {
-            wrong.push((span, "an instant".to_string()));
+        if let (Some(Operand::Instant(span)), false) = (&setting.value, key.instant) {
+            wrong.push((*span, "an instant".to_string()));
         }
         for (number, argument) in setting.arguments.iter().enumerate() {
             let name = &argument.name;

@@ -47,7 +47,10 @@ impl<'p, S: Scalar> Book<'p, S> {
             history: History::new(),
             events: Vec::new(),
             phases: Vec::new(),
-            ledger: Ledger::default(),
+            ledger: Ledger {
+                total: LedgerRow { ideal: Some(0.0), ..LedgerRow::default() },
+                ..Ledger::default()
+            },
             burns: Vec::new(),
             notices: Vec::new(),
             shed: Vec::new(),

@@ -39,7 +39,7 @@ pub fn search<S: Scalar>(history: &History<S>, wanted: &[Wanted<S>]) -> Vec<Opti
                         continue;
                     }
                     let value = wanted.program.run(|reading| look.read(reading)).real();
-                    if value.is_finite() && best.is_none_or(|(greatest, _)| value > greatest) {
+                    if value.is_finite() && best.is_none_or(|(greatest, _)| exceeds(value, greatest)) {
                         *best = Some((value, index));
                     }
                 }
@@ -62,13 +62,18 @@ fn climb<S: Scalar>(history: &History<S>, wanted: &Wanted<S>, best: usize) -> Su
             history.look(leg, time, |look| wanted.program.run(|reading| look.read(reading)).real())
         };
         let (time, value) = maximum(leg.start(), leg.end(), at);
-        if value > summit.value {
+        if exceeds(value, summit.value) {
             let edge = 1e-6 * (leg.end() - leg.start());
             let corner = time - leg.start() <= edge || leg.end() - time <= edge;
             summit = Summit { value, time, leg: index, corner };
         }
     }
     summit
+}
+
+/// Whether a value is greater by more than rounding: on a plateau the first summit stands.
+fn exceeds(value: f64, greatest: f64) -> bool {
+    value > greatest && (greatest == f64::NEG_INFINITY || value - greatest > 1e-9 * greatest.abs())
 }
 
 fn within<S: Scalar>(leg: &Leg<S>, share: f64) -> f64 {

@@ -20,7 +20,7 @@ use crate::world::DateTime;
 const KEYS: &[Key] = &[
     Key::new("flies", "flies  Rowan"),
     Key::new("within", "within  Earth"),
-    Key::new("epoch", "epoch  2027-05-14T09:30:00Z"),
+    Key::new("epoch", "epoch  2027-05-14T09:30:00Z").instant(),
     Key::new("payload", "payload  132 kg"),
     Key::new("adapter", "adapter  9.5 kg"),
 ];

@@ -16,7 +16,7 @@ pub fn maximum(start: f64, end: f64, mut f: impl FnMut(f64) -> f64) -> (f64, f64
         (0..=LOOKS).map(|index| f(if index == LOOKS { end } else { look(index) })).collect();
     let mut best = 0;
     for (index, value) in values.iter().enumerate() {
-        if *value > values[best] {
+        if *value - values[best] > 1e-12 * values[best].abs() {
             best = index;
         }
     }
@@ -40,7 +40,8 @@ pub fn maximum(start: f64, end: f64, mut f: impl FnMut(f64) -> f64) -> (f64, f64
         }
     }
     for (time, value) in [(inner, at_inner), (outer, at_outer)] {
-        if value > found.1 {
+        // On a plateau the end stands, where something began to hold.
+        if value - found.1 > 1e-12 * found.1.abs() {
             found = (time, value);
         }
     }

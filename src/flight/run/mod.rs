@@ -51,7 +51,7 @@ enum After {
 
 impl<'p, 's, S: Scalar> Run<'p, 's, S> {
     pub fn new(plan: &'p Plan<S>, settings: &'s Settings, frame: Frame) -> Self {
-        Run {
+        let mut run = Run {
             plan,
             settings,
             motion: Motion::new(plan, frame),
@@ -65,7 +65,9 @@ impl<'p, 's, S: Scalar> Run<'p, 's, S> {
             conditions: Vec::new(),
             throttle_chosen: false,
             book: Book::new(),
-        }
+        };
+        run.attach();
+        run
     }
 
     /// Flies every phase in order. Whatever was flown is in the book, a failure or not.
