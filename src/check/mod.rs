@@ -3,7 +3,6 @@
 //! Nothing here does I/O: a [`Reader`] supplies the bytes of files. All errors of all files are
 //! collected; what is broken in the tree has been reported by the parser and is passed over in
 //! silence. A model comes out only where there is no error.
-#![allow(dead_code, unused_imports)]
 
 mod blocks;
 mod changed;
@@ -40,8 +39,7 @@ pub(crate) use dimensions::with_article;
 pub(crate) use expression::Typed;
 pub(crate) use lines::Inherited;
 pub(crate) use names::{BlockId, ScopeId};
-pub(crate) use operators::FUNCTIONS;
-pub(crate) use sheet::{Key, Sheet, Stated};
+pub(crate) use sheet::{Key, Stated};
 pub(crate) use want::Want;
 
 #[cfg(test)]

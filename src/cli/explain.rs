@@ -14,7 +14,9 @@ pub fn run(command: &ExplainCommand) -> Status {
             let names = diagnostics::codes::ALL.iter().map(|code| code.name);
             let hint = diagnostics::nearest(name, names)
                 .map_or_else(String::new, |near| format!("; did you mean `{near}`?"));
-            output::complain(&format!("no diagnostic has the code `{name}`{hint} (`stagewright explain` lists all)"))
+            output::complain(&format!(
+                "no diagnostic has the code `{name}`{hint} (`stagewright explain` lists all)"
+            ))
         }
     }
 }

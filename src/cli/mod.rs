@@ -5,6 +5,7 @@ mod builtin;
 mod check;
 mod completions;
 mod explain;
+mod findings;
 mod fly;
 mod manpages;
 mod model;

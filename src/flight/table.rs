@@ -57,21 +57,6 @@ impl<S: Scalar> Table<S> {
         let values = self.rows.iter().map(|row| row.at(&self.second, second, self.beyond)).collect();
         Row::new(&self.first, values, self.smooth).at(&self.first, first, self.beyond)
     }
-
-    /// Integral over the whole first input of a curve of one input; the trapezoidal rule with the
-    /// correction of the slopes, exact for both kinds.
-    pub fn integral(&self) -> S {
-        let mut sum = S::zero();
-        let Some(row) = self.rows.first() else { return sum };
-        for (left, ends) in self.first.windows(2).enumerate() {
-            let width = ends[1] - ends[0];
-            sum += (row.values[left] + row.values[left + 1]) * (0.5 * width);
-            if self.smooth {
-                sum += (row.slopes[left] - row.slopes[left + 1]) * (width * width / 12.0);
-            }
-        }
-        sum
-    }
 }
 
 impl<S: Scalar> Row<S> {

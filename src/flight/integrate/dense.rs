@@ -26,11 +26,6 @@ impl<S: Scalar> Dense<S> {
         (self.start + self.size).real()
     }
 
-    /// Number of components.
-    pub fn dimension(&self) -> usize {
-        self.coefficients.len() / 8
-    }
-
     /// The whole state at a time within the step.
     pub fn state(&self, time: S, state: &mut [S]) {
         let at = (time - self.start) / self.size;
@@ -38,13 +33,6 @@ impl<S: Scalar> Dense<S> {
         for (value, piece) in state.iter_mut().zip(self.coefficients.chunks_exact(8)) {
             *value = polynomial(piece, at, rest);
         }
-    }
-
-    /// One component at a time within the step; zero where there is no such component.
-    pub fn component(&self, component: usize, time: S) -> S {
-        let at = (time - self.start) / self.size;
-        let piece = self.coefficients.get(8 * component..8 * component + 8);
-        piece.map_or_else(S::zero, |piece| polynomial(piece, at, S::one() - at))
     }
 }
 

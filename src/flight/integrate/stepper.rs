@@ -250,11 +250,6 @@ impl<S: Scalar> Stepper<S> {
         &self.y1
     }
 
-    /// The derivative at the end of the last step.
-    pub fn end_rate(&self) -> &[S] {
-        &self.rate
-    }
-
     /// The size that the next step would have.
     pub fn next_size(&self) -> f64 {
         self.next_size
