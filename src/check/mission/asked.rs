@@ -5,8 +5,10 @@ use std::collections::BTreeMap;
 use super::Site;
 use super::formula::{Built, Speaks};
 use crate::check::{Context, Inherited, ScopeId};
-use crate::diagnostics::codes::{duplicate_name, empty_band, objective_without_knob, unknown_name};
-use crate::model::{Aim, Demand, Figure, Formula, Headline, Knob, Objective, Requirement};
+use crate::diagnostics::codes::{
+    duplicate_name, empty_band, objective_without_knob, unknown_name, unreachable_inclination,
+};
+use crate::model::{Aim, Demand, Figure, Formula, Headline, Knob, Objective, Quantity, Requirement};
 use crate::quantity::Dimension;
 use crate::source::Span;
 use crate::syntax::{self, Because, Expr, Path, Statement};
@@ -155,6 +157,14 @@ impl<'a> Context<'a> {
             }
         };
         let built = built?;
+        if let Some(
+            Requirement::AtMost { limit: most }
+            | Requirement::Between { high: most, .. }
+            | Requirement::Within { target: most, .. },
+        ) = &requirement
+        {
+            self.reachable(site, scope, (quantity.span, &built.formula), most);
+        }
         let unit = self.unit_of(scope, shown, built.dimension);
         let unit = if unit.is_empty() { self.shown_in(site, scope, quantity, &built) } else { unit };
         Some(Demand {
@@ -187,6 +197,7 @@ impl<'a> Context<'a> {
         let tolerance = self.limit(site, scope, (&path, within), Speaks::Whole, want, because);
         let (aimed, tolerance) = (aimed?, tolerance?);
         self.positive(&tolerance, within.span)?;
+        self.reachable(site, scope, (quantity.span, &built.formula), &aimed);
         let unit = self.unit_of(scope, target, built.dimension);
         let unit = if unit.is_empty() { self.shown_in(site, scope, quantity, &built) } else { unit };
         Some(Aim {
@@ -206,6 +217,26 @@ impl<'a> Context<'a> {
         }
         self.report(empty_band::found(span, "the tolerance is not above zero"));
         None
+    }
+
+    /// Warns of an inclination below the latitude of the pad, which a flight reaches only by a turn.
+    /// The latitude is geodetic; the plane passes over the geocentric one, up to 0.2 deg lower.
+    fn reachable(
+        &mut self,
+        site: &Site<'a>,
+        scope: ScopeId,
+        (span, quantity): (Span, &Formula),
+        most: &Formula,
+    ) {
+        let Formula::At { of, .. } = quantity else { return };
+        let inclined =
+            matches!(**of, Formula::Reading { reading } if reading.quantity == Quantity::Inclination);
+        let (Some(latitude), Some(wanted), true) = (site.latitude, fixed(most), inclined) else { return };
+        let slack = 0.2_f64.to_radians();
+        if wanted < latitude.abs() - slack {
+            let shown = (self.show(scope, wanted, "deg"), self.show(scope, latitude.abs(), "deg"));
+            self.report(unreachable_inclination::found(span, &shown.0, &shown.1));
+        }
     }
 
     /// The unit in which to show a quantity: that of a fact in it, else the trade's.

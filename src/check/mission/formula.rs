@@ -6,7 +6,7 @@ use crate::diagnostics::codes::{absent_quantity, after_the_flight, no_place, not
 use crate::model::{Edge, Formula, Gravity, Operator, Quantity, QuantityKind, Reading, Surface, Value};
 use crate::quantity::Dimension;
 use crate::source::Span;
-use crate::syntax::{self, Expr, ExprKind, Name, Path};
+use crate::syntax::{self, Expr, ExprKind, Name, Path, Statement};
 
 /// A formula with what its place has to know of it.
 pub(super) struct Built {
@@ -151,6 +151,7 @@ impl<'a> Context<'a> {
                 let of = self.formula(site, scope, quantity, Speaks::Instant);
                 let phase = self.phase_named(site, phase)? as u32;
                 let of = of?;
+                self.not_yet_shed(site, expr.span, &of.formula, phase)?;
                 let edge = if *end { Edge::End } else { Edge::Start };
                 let formula = Formula::At { of: Box::new(of.formula), edge, phase };
                 Some(Built { formula, reading: None, whole: Some(expr.span), ..of })
@@ -245,6 +246,22 @@ impl<'a> Context<'a> {
         Formula::Fact { value }
     }
 
+    /// Reports a part that is read in a phase after the one that sheds it.
+    fn not_yet_shed(&mut self, site: &Site<'a>, span: Span, of: &Formula, phase: u32) -> Option<()> {
+        for part in parts_read(of) {
+            let name = &site.vehicle.parts.get(part as usize)?.name;
+            let before = site.phases.iter().take(phase as usize).flat_map(|phase| &phase.block.lines);
+            let shed = before
+                .into_iter()
+                .find(|line| matches!(&line.statement, Statement::Shed { part, .. } if part.text == *name));
+            if let Some(shed) = shed {
+                self.report(absent_quantity::after_shed(span, name, shed.span));
+                return None;
+            }
+        }
+        Some(())
+    }
+
     /// Reports a quantity that the mission's world has not.
     fn exists(&mut self, site: &Site<'a>, span: Span, quantity: Quantity) -> Option<()> {
         let world = &site.world;
@@ -269,6 +286,17 @@ fn lowered(operator: syntax::Operator) -> Operator {
         syntax::Operator::Multiply => Operator::Multiply,
         syntax::Operator::Divide => Operator::Divide,
         syntax::Operator::Power => Operator::Power,
+    }
+}
+
+/// The parts of which a formula reads something at its own instant.
+pub(super) fn parts_read(formula: &Formula) -> Vec<u32> {
+    match formula {
+        Formula::Reading { reading } => reading.part.into_iter().collect(),
+        Formula::Negate { of } => parts_read(of),
+        Formula::Binary { left, right, .. } => [parts_read(left), parts_read(right)].concat(),
+        Formula::Call { of, .. } => of.iter().flat_map(parts_read).collect(),
+        _ => Vec::new(),
     }
 }
 

@@ -11,7 +11,7 @@ mod steer;
 
 use super::{BlockId, Bound, Context, Inherited, Key, ScopeId, Stated};
 use crate::diagnostics::codes::{duplicate_name, impossible_epoch, missing_fact, unknown_name};
-use crate::model::{Epoch, Mission, Vehicle, World};
+use crate::model::{Epoch, Mission, Start, Vehicle, World};
 use crate::quantity::Dimension;
 use crate::source::Span;
 use crate::syntax::{Block, BlockKind, ExprKind, Name, Operand, Statement};
@@ -36,6 +36,8 @@ pub(super) struct Site<'a> {
     pub world: World,
     /// Place of `within`, for what the world has not.
     pub within: Span,
+    /// Of a start from a pad, rad.
+    pub latitude: Option<f64>,
     pub phases: Vec<PhaseBlock<'a>>,
     /// Figures stated so far.
     pub figures: Vec<(String, Dimension, String)>,
@@ -123,7 +125,15 @@ impl<'a> Context<'a> {
         let ((vehicle_block, flies), (world_block, within)) = (vehicle?, world?);
         let (vehicle, world) = (self.vehicle(vehicle_block), self.world(world_block));
         self.check_in_air(vehicle_block, world_block, flies);
-        let mut site = Site { block, vehicle: vehicle?, world: world?, within, phases, figures: Vec::new() };
+        let mut site = Site {
+            block,
+            vehicle: vehicle?,
+            world: world?,
+            within,
+            latitude: None,
+            phases,
+            figures: Vec::new(),
+        };
         let start = match start {
             Some(line) => self.start(&site, line),
             None => {
@@ -135,6 +145,9 @@ impl<'a> Context<'a> {
                 None
             }
         };
+        if let Some(Start::Pad { latitude, .. }) = &start {
+            site.latitude = Some(latitude.si);
+        }
         let flown = self.phases(&site);
         let asked = self.asked(&mut site, &asked);
         if let Some(flown) = &flown {

@@ -2,11 +2,12 @@
 //! be lit again.
 
 use super::Site;
+use super::formula::parts_read;
 use super::phase::Checked;
 use crate::check::Context;
 use crate::diagnostics::codes::{
-    already_lit, already_shed, burnt_too_early, endless_phase, nothing_throttles, shed_while_burning,
-    still_carried, throttle_out_of_range, too_many_restarts, unused_part,
+    absent_quantity, already_lit, already_shed, burnt_too_early, endless_phase, nothing_throttles,
+    shed_while_burning, still_carried, throttle_out_of_range, too_many_restarts, unused_part,
 };
 use crate::model::{Condition, Engine, Part, Role};
 use crate::source::Span;
@@ -29,7 +30,7 @@ impl<'a> Context<'a> {
         for phase in phases {
             self.check_burns(parts, phase, &mut state);
             self.check_throttle(parts, phase);
-            self.check_end(parts, phase);
+            self.check_end(parts, phase, &state);
             self.check_sheds(parts, phase, &mut state);
         }
         for (index, part) in parts.iter().enumerate() {
@@ -43,7 +44,7 @@ impl<'a> Context<'a> {
     fn check_burns(&mut self, parts: &[Part], phase: &Checked, state: &mut State) {
         let burns = phase.model.burns.iter().map(|burn| burn.part as usize).zip(&phase.burns);
         let lights = phase.model.lights.iter().map(|light| light.part as usize).zip(&phase.lights);
-        let mut lit = Vec::new();
+        let mut lit: Vec<(usize, Span)> = Vec::new();
         for (light, (part, (span, hot))) in burns.map(|one| (false, one)).chain(lights.map(|one| (true, one)))
         {
             let name = &parts[part].name;
@@ -51,13 +52,19 @@ impl<'a> Context<'a> {
                 self.report(already_shed::found(*span, name, shed));
                 continue;
             }
-            if light && (lit.contains(&part) || state.burning.contains(&part)) {
-                self.report(already_lit::found(*span, name));
+            if let Some((_, first)) = lit.iter().find(|(before, _)| *before == part) {
+                self.report(already_lit::found(*span, name, *first));
+                continue;
             }
-            if let (false, Some(below)) = (*hot, below(parts, part, state)) {
+            // What is lit within the phase may come after a shed within it.
+            let below = below(parts, part, state).filter(|below| {
+                !(light && phase.model.sheds.iter().any(|shed| shed.part as usize == *below))
+            });
+            if let (false, Some(below)) = (*hot, below) {
                 self.report(burnt_too_early::found(*span, name, &parts[below].name));
             }
-            if !state.burning.contains(&part) && !lit.contains(&part) {
+            // A `light` starts a burn of its own: between the phases the part was out.
+            if light || !state.burning.contains(&part) {
                 let (before, count) = state.lit[part];
                 state.lit[part] = (Some(*span), count + 1);
                 let restarts = engine(&parts[part]).and_then(|engine| engine.restarts);
@@ -67,9 +74,9 @@ impl<'a> Context<'a> {
                     self.report(too_many_restarts::found(*span, name, restarts.si as u32, before));
                 }
             }
-            lit.push(part);
+            lit.push((part, *span));
         }
-        state.burning = lit;
+        state.burning = lit.into_iter().map(|(part, _)| part).collect();
     }
 
     fn check_throttle(&mut self, parts: &[Part], phase: &Checked) {
@@ -80,14 +87,15 @@ impl<'a> Context<'a> {
             .map(|burn| burn.part)
             .chain(phase.model.lights.iter().map(|light| light.part));
         let engines: Vec<&Engine> = lit.filter_map(|part| engine(&parts[part as usize])).collect();
-        if let Some(hold) = &phase.model.hold
-            && !engines.is_empty()
+        if phase.model.hold.is_some()
             && engines.iter().all(|engine| engine.throttle_least.si >= engine.throttle_most.si)
         {
-            let _ = hold;
             self.report(nothing_throttles::found(phase.name, &phase.model.name));
         }
         if let (Some(throttle), Some(span)) = (phase.model.throttle, phase.throttle) {
+            if engines.is_empty() {
+                self.report(nothing_throttles::coast(span, &phase.model.name));
+            }
             for engine in engines {
                 let (least, most) = (engine.throttle_least.si, engine.throttle_most.si);
                 if !(least - 1e-12..=most + 1e-12).contains(&throttle.si) {
@@ -101,7 +109,22 @@ impl<'a> Context<'a> {
     }
 
     /// A phase that ends only by a part that does not burn in it never ends.
-    fn check_end(&mut self, parts: &[Part], phase: &Checked) {
+    fn check_end(&mut self, parts: &[Part], phase: &Checked, state: &State) {
+        for condition in &phase.model.until {
+            let read = match condition {
+                Condition::Compare { quantity, limit, .. } => {
+                    parts_read(quantity).into_iter().chain(parts_read(limit)).collect()
+                }
+                Condition::Spent { part } => vec![*part],
+                _ => Vec::new(),
+            };
+            for part in read {
+                if let Some(shed) = state.shed[part as usize] {
+                    let name = &parts[part as usize].name;
+                    self.report(absent_quantity::after_shed(phase.until, name, shed));
+                }
+            }
+        }
         let burns = |part: u32| {
             phase.model.burns.iter().any(|burn| burn.part == part)
                 || phase.model.lights.iter().any(|light| light.part == part)
@@ -121,9 +144,13 @@ impl<'a> Context<'a> {
     }
 
     fn check_sheds(&mut self, parts: &[Part], phase: &Checked, state: &mut State) {
-        // Those in flight come before those at the phase's end.
+        // Those in flight come before those at the phase's end; at one instant strap-ons go first,
+        // and stages from the bottom up.
         let mut order: Vec<usize> = (0..phase.sheds.len()).collect();
-        order.sort_by_key(|index| phase.model.sheds[*index].when.is_none());
+        order.sort_by_key(|index| {
+            let shed = &phase.model.sheds[*index];
+            (shed.when.is_none(), !matches!(parts[shed.part as usize].role, Role::Beside { .. }), shed.part)
+        });
         for index in order {
             let (shed, span) = (&phase.model.sheds[index], phase.sheds[index]);
             let part = shed.part as usize;
@@ -142,18 +169,22 @@ impl<'a> Context<'a> {
                     self.report(still_carried::found(span, name, &carried.name));
                 }
             }
+            if let (Role::Stack { .. }, Some(below)) = (&parts[part].role, below(parts, part, state)) {
+                self.report(still_carried::below(span, name, &parts[below].name));
+            }
             state.shed[part] = Some(span);
             state.burning.retain(|burning| *burning != part);
         }
     }
 }
 
-/// The lowest stage below a stage of the stack that is still there.
+/// The lowest stage that is still there below a stage of the stack, or below what carries a strap-on.
 fn below(parts: &[Part], part: usize, state: &State) -> Option<usize> {
-    let own = match parts[part].role {
-        Role::Stack { position } => position,
-        Role::Beside { .. } | Role::Shroud => return None,
+    let carrier = match parts[part].role {
+        Role::Beside { carrier } => carrier as usize,
+        Role::Stack { .. } | Role::Shroud => part,
     };
+    let Role::Stack { position: own } = parts.get(carrier)?.role else { return None };
     parts.iter().enumerate().position(|(index, other)| {
         matches!(other.role, Role::Stack { position } if position < own) && state.shed[index].is_none()
     })

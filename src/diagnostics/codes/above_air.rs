@@ -9,7 +9,7 @@ pub static CODE: Code = Code {
     title: "the flight goes above the top of the air",
     explanation: "Above its top a model of the air knows none: there is no drag and no heating from there on.",
     wrong: r#"bring Earth from builtin
-engine Tansy { thrust 40 kN in vacuum; isp 320 s in vacuum }
+engine Tansy { thrust 40 kN in vacuum; isp 320 s in vacuum; exit_area 0.4 m^2 }
 stage Sedge { engines 1 of Tansy; dry 200 kg; propellant 1900 kg }
 vehicle Heron { stack Sedge; drag none }
 
@@ -23,7 +23,7 @@ mission Raise {
 }
 "#,
     mended: r#"bring Earth from builtin
-engine Tansy { thrust 40 kN in vacuum; isp 320 s in vacuum }
+engine Tansy { thrust 40 kN in vacuum; isp 320 s in vacuum; exit_area 0.4 m^2 }
 stage Sedge { engines 1 of Tansy; dry 200 kg; propellant 1900 kg }
 vehicle Heron { stack Sedge; drag none }
 

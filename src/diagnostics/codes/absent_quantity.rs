@@ -54,3 +54,9 @@ pub fn found(span: Span, written: &str, why: &str, because: Option<Span>) -> Dia
         None => diagnostic,
     }
 }
+
+/// Something of a part that has been shed before.
+pub fn after_shed(span: Span, part: &str, shed: Span) -> Diagnostic {
+    CODE.at(span, format!("`{part}` is gone by then"), "asks after it").and(shed, "shed here")
+        .help(format!("ask at an earlier place, or shed `{part}` later"))
+}

@@ -1,4 +1,4 @@
-//! `already-lit`: a `light` of something that burns.
+//! `already-lit`: something lit twice in one phase.
 
 use crate::diagnostics::{Code, Diagnostic, Severity};
 use crate::source::Span;
@@ -45,7 +45,8 @@ mission Hop {
 "#,
 };
 
-pub fn found(span: Span, part: &str) -> Diagnostic {
+pub fn found(span: Span, part: &str, first: Span) -> Diagnostic {
     CODE.at(span, format!("`{part}` burns already"), "lit a second time here")
-        .help("leave it out of `burn` if it is to be lit later, or leave out this `light`")
+        .and(first, "lit here")
+        .help("leave it out of `burn` if it is to be lit later, or leave out the second")
 }

@@ -44,3 +44,7 @@ pub fn found(span: Span, phase: &str) -> Diagnostic {
     CODE.at(span, format!("no engine that burns in `{phase}` can throttle"), "holds a limit by throttle")
         .help("give an engine a range, such as `throttle 60 % .. 100 %`, or leave the hold out")
 }
+
+pub fn coast(span: Span, phase: &str) -> Diagnostic {
+    CODE.at(span, format!("no engine burns in `{phase}`"), "throttles nothing").help("leave the throttle out")
+}

@@ -41,7 +41,7 @@ mission Hop {
         steer  upright
         until  6 s
     }
-    phase Rest { coast; until altitude >= 60 m or 1 s }
+    phase Rest { coast; until altitude rises to 110 m or 30 s }
 }
 "#,
 };
