@@ -214,6 +214,8 @@ pub struct DemandResult {
     pub limit: f64,
     /// Positive when met.
     pub margin: f64,
+    /// What a margin is a share of: the size of the limit, or half the width of a band.
+    pub scale: f64,
     pub met: bool,
     /// Where a peak stood.
     pub time: Option<f64>,

@@ -127,16 +127,19 @@ fn demand(quantity: &Formula, requirement: &Requirement, flown: &Flown) -> Deman
     let mut time = None;
     let value = evaluate(quantity, flown, &mut time);
     let found = value.unwrap_or(f64::NAN);
+    let limit = |limit: f64, margin: f64| (limit, margin, limit.abs());
     let band = |low: f64, high: f64| {
-        if found - low < high - found { (low, found - low) } else { (high, high - found) }
+        let (end, margin) =
+            if found - low < high - found { (low, found - low) } else { (high, high - found) };
+        (end, margin, 0.5 * (high - low))
     };
-    let (limit, margin) = match requirement {
-        Requirement::AtLeast { limit } => (number(limit), found - number(limit)),
-        Requirement::AtMost { limit } => (number(limit), number(limit) - found),
+    let (limit, margin, scale) = match requirement {
+        Requirement::AtLeast { limit: least } => limit(number(least), found - number(least)),
+        Requirement::AtMost { limit: most } => limit(number(most), number(most) - found),
         Requirement::Between { low, high } => band(number(low), number(high)),
         Requirement::Within { target, tolerance } => {
             band(number(target) - number(tolerance), number(target) + number(tolerance))
         }
     };
-    DemandResult { value, limit, margin, met: margin >= 0.0, time }
+    DemandResult { value, limit, margin, scale, met: margin >= 0.0, time }
 }

@@ -65,10 +65,10 @@ pub struct Demand {
     pub limit: f64,
     /// Positive when met.
     pub margin: Option<f64>,
-    /// Margin over the size of the limit, %.
+    /// Margin over the size of the limit, or over half the width of a band, %.
     pub margin_percent: Option<f64>,
     pub met: bool,
-    /// Met with less than 5 % of its limit to spare.
+    /// Met with less than 5 % of that to spare.
     pub close: bool,
     /// When a peak stood, s.
     pub time_s: Option<f64>,

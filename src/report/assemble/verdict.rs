@@ -25,7 +25,7 @@ pub fn verdict(
         .map(|(asked, result)| {
             let unit = show.unit(asked.dimension, &asked.unit).to_owned();
             let margin = result.value.map(|_| result.margin);
-            let share = margin.filter(|_| result.limit != 0.0).map(|margin| margin / result.limit.abs());
+            let share = margin.filter(|_| result.scale > 0.0).map(|margin| margin / result.scale);
             Demand {
                 name: asked.name.clone(),
                 quantity: asked.written.clone(),

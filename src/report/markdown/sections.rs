@@ -26,7 +26,7 @@ pub fn verdict(report: &Report, show: &Show) -> String {
     let mut text = format!("## Verdict: {}\n\n{}\n", word.to_lowercase(), plain(&verdict.sentence));
     let mut demands = Table::new(
         &["demand", "quantity", "required", "outcome"],
-        &["value".into(), "margin".into(), "margin, % of limit".into(), "at, s".into()],
+        &["value".into(), "margin".into(), "margin, %".into(), "at, s".into()],
     );
     for demand in &verdict.demands {
         let outcome = match (demand.met, demand.close) {

@@ -11,7 +11,7 @@ use crate::report::show::Show;
 const WIDTH: f64 = 860.0;
 const LEFT: f64 = 74.0;
 const RIGHT: f64 = 18.0;
-const TOP: f64 = 92.0;
+const TOP: f64 = 112.0;
 const PANEL: f64 = 132.0;
 const GAP: f64 = 34.0;
 const BOTTOM: f64 = 44.0;
@@ -80,10 +80,10 @@ fn phases(svg: &mut Svg, mission: &Mission, flight: &Flight, time: &Scale, botto
         let half = 0.5 * room(name);
         let middle = 0.5 * (from + to);
         let x = middle.clamp(LEFT + half.min(200.0), (WIDTH - RIGHT - half).max(LEFT));
-        let row = (0..ROWS).map(|row| TOP - 8.0 - 15.0 * row as f64).find(|y| labels.take((x, *y), name));
+        let row = (0..ROWS).map(|row| TOP - 28.0 - 15.0 * row as f64).find(|y| labels.take((x, *y), name));
         if let Some(y) = row {
             svg.text((x, y), Anchor::Middle, Paint::Faint, 11, name);
-            svg.line((middle, y + 3.0), (middle, TOP), Paint::Grid, 1.0);
+            svg.line((middle, y + 3.0), (middle, TOP - 22.0), Paint::Grid, 1.0);
         }
     }
 }
@@ -128,13 +128,12 @@ fn draw_panel(svg: &mut Svg, flight: &Flight, show: &Show, panel: &Panel, time: 
         let at = (time.place(peak.state.time), scale.place(peak.value / factor));
         svg.dot(at, Paint::Third);
         let anchor = if at.0 > 0.8 * WIDTH { Anchor::End } else { Anchor::Start };
-        let x = if anchor == Anchor::End { at.0 - 8.0 } else { at.0 + 8.0 };
+        let x = if anchor == Anchor::End { at.0 - 9.0 } else { at.0 + 9.0 };
         let text = format!(
             "{} {unit} at {} s",
             show.number(peak.value, unit, 4),
             crate::quantity::format_fixed(peak.state.time, 1)
         );
-        // Below the summit, so that the text stays within the panel.
-        svg.text((x, at.1 + 13.0), anchor, Paint::Third, 12, text.trim());
+        svg.text((x, at.1 + 4.0), anchor, Paint::Third, 12, text.trim());
     }
 }
