@@ -126,6 +126,27 @@ impl<'a> Context<'a> {
         lines
     }
 
+    /// The lines of a phase over those of the phase that it is like: of two lines that state the same
+    /// fact its own stands, and a phase that coasts keeps no burn.
+    pub(crate) fn over(&self, mut below: Vec<&'a Line>, own: Vec<&'a Line>) -> Vec<&'a Line> {
+        let burns = |line: &Line| matches!(line.statement, Statement::Burn(_) | Statement::Light { .. });
+        let coasts = |line: &Line| matches!(line.statement, Statement::Coast);
+        if own.iter().any(|line| burns(line)) {
+            below.retain(|line| !coasts(line));
+        }
+        if own.iter().any(|line| coasts(line)) {
+            below.retain(|line| !burns(line));
+        }
+        for line in own {
+            let key = self.key(line);
+            match below.iter_mut().find(|before| key.is_some() && self.key(before) == key) {
+                Some(before) => *before = line,
+                None => below.push(line),
+            }
+        }
+        below
+    }
+
     fn key_words(&self, key: Key<'a>) -> String {
         match key {
             Key::Fact(name, None) => name.to_string(),

@@ -3,7 +3,7 @@
 use std::collections::BTreeMap;
 
 use super::Site;
-use super::formula::{Built, Speaks};
+use super::formula::{Built, Speaks, constant};
 use crate::check::{Context, Inherited, ScopeId};
 use crate::diagnostics::codes::{
     duplicate_name, empty_band, objective_without_knob, unknown_name, unreachable_inclination,
@@ -97,9 +97,12 @@ impl<'a> Context<'a> {
         name: &syntax::Name,
         value: &Expr,
     ) -> Option<Figure> {
-        let built = self.formula(site, line.scope, value, Speaks::Whole)?;
+        let Some(built) = self.formula(site, line.scope, value, Speaks::Whole) else {
+            site.figures.push((name.text.clone(), None, String::new()));
+            return None;
+        };
         let unit = self.shown_in(site, line.scope, value, &built);
-        site.figures.push((name.text.clone(), built.dimension, unit.clone()));
+        site.figures.push((name.text.clone(), Some(built.dimension), unit.clone()));
         Some(Figure {
             name: name.text.clone(),
             written: self.text(value.span).to_string(),
@@ -125,7 +128,8 @@ impl<'a> Context<'a> {
         let mut bound = |expr: &Expr, part: &str| {
             let what = format!("the limit of `{written}`");
             let path = if part.is_empty() { format!("{name}.limit") } else { format!("{name}.{part}") };
-            self.limit(site, scope, (&path, expr), Speaks::Whole, (dimension?, &what), because)
+            let asked = (quantity.span, dimension?, what.as_str());
+            self.limit_of(site, scope, (&path, expr), Speaks::Whole, asked, because)
         };
         let (requirement, shown) = match requirement {
             syntax::Requirement::AtLeast(limit) => {
@@ -137,7 +141,7 @@ impl<'a> Context<'a> {
             syntax::Requirement::Between(low, high) => {
                 let bounds = bound(low, "low").zip(bound(high, "high"));
                 if let Some((low_bound, high_bound)) = &bounds
-                    && let (Some(from), Some(to)) = (fixed(low_bound), fixed(high_bound))
+                    && let (Some(from), Some(to)) = (constant(low_bound), constant(high_bound))
                     && from > to
                 {
                     self.report(empty_band::found(
@@ -190,11 +194,11 @@ impl<'a> Context<'a> {
         let built = self.formula(site, scope, quantity, Speaks::Whole)?;
         let what = format!("the target of `{written}`");
         let path = format!("aim.{}", written.replace(' ', "_"));
-        let want = (built.dimension, what.as_str());
-        let aimed = self.limit(site, scope, (&path, target), Speaks::Whole, want, because);
+        let asked = (quantity.span, built.dimension, what.as_str());
+        let aimed = self.limit_of(site, scope, (&path, target), Speaks::Whole, asked, because);
         let path = format!("{path}.within");
-        let want = (built.dimension, "the tolerance of the aim");
-        let tolerance = self.limit(site, scope, (&path, within), Speaks::Whole, want, because);
+        let asked = (quantity.span, built.dimension, "the tolerance of the aim");
+        let tolerance = self.limit_of(site, scope, (&path, within), Speaks::Whole, asked, because);
         let (aimed, tolerance) = (aimed?, tolerance?);
         self.positive(&tolerance, within.span)?;
         self.reachable(site, scope, (quantity.span, &built.formula), &aimed);
@@ -212,7 +216,7 @@ impl<'a> Context<'a> {
     }
 
     fn positive(&mut self, tolerance: &Formula, span: Span) -> Option<()> {
-        if fixed(tolerance).is_none_or(|tolerance| tolerance > 0.0) {
+        if constant(tolerance).is_none_or(|tolerance| tolerance > 0.0) {
             return Some(());
         }
         self.report(empty_band::found(span, "the tolerance is not above zero"));
@@ -231,7 +235,7 @@ impl<'a> Context<'a> {
         let Formula::At { of, .. } = quantity else { return };
         let inclined =
             matches!(**of, Formula::Reading { reading } if reading.quantity == Quantity::Inclination);
-        let (Some(latitude), Some(wanted), true) = (site.latitude, fixed(most), inclined) else { return };
+        let (Some(latitude), Some(wanted), true) = (site.latitude, constant(most), inclined) else { return };
         let slack = 0.2_f64.to_radians();
         if wanted < latitude.abs() - slack {
             let shown = (self.show(scope, wanted, "deg"), self.show(scope, latitude.abs(), "deg"));
@@ -268,15 +272,6 @@ impl<'a> Context<'a> {
         }
         self.report(unknown_name::found(path.span, "a figure or a fact", text, None));
         None
-    }
-}
-
-/// The value of a formula that is a number or a fact.
-fn fixed(formula: &Formula) -> Option<f64> {
-    match formula {
-        Formula::Number { si } => Some(*si),
-        Formula::Fact { value } => Some(value.si),
-        _ => None,
     }
 }
 

@@ -1,8 +1,11 @@
 //! Expressions over flight quantities.
 
 use super::Site;
+use crate::check::operators::{apply_function, apply_operator};
 use crate::check::{Context, ScopeId, Want};
-use crate::diagnostics::codes::{absent_quantity, after_the_flight, no_place, not_constant, unknown_name};
+use crate::diagnostics::codes::{
+    absent_quantity, after_the_flight, impossible_value, no_place, not_constant, unknown_name,
+};
 use crate::model::{Edge, Formula, Gravity, Operator, Quantity, QuantityKind, Reading, Surface, Value};
 use crate::quantity::Dimension;
 use crate::source::Span;
@@ -46,7 +49,11 @@ impl<'a> Context<'a> {
         expr: &Expr,
         speaks: Speaks,
     ) -> Option<Built> {
-        let built = self.deeper(1, expr.span, |context| context.build(site, scope, expr))?;
+        let built = self.formula_part(site, scope, expr)?;
+        if constant(&built.formula).is_some_and(|value| !value.is_finite()) {
+            self.report(impossible_value::found(expr.span, "this has no finite value", "a finite number"));
+            return None;
+        }
         match (speaks, built.whole, built.reading) {
             (Speaks::Constant | Speaks::Instant, Some(span), _) => {
                 self.report(after_the_flight::found(span, self.text(span)));
@@ -92,15 +99,7 @@ impl<'a> Context<'a> {
             ExprKind::Binary { left, operator, operator_span, right } => {
                 let sides = (self.formula_part(site, scope, left), self.formula_part(site, scope, right));
                 let (a, b) = (sides.0?, sides.1?);
-                let exponent = match &b.formula {
-                    Formula::Number { si } => Some(*si),
-                    Formula::Fact { value } => Some(value.si),
-                    Formula::Negate { of } => match &**of {
-                        Formula::Number { si } => Some(-si),
-                        _ => None,
-                    },
-                    _ => None,
-                };
+                let exponent = constant(&b.formula);
                 let dimension = self.binary(
                     scope,
                     (left, a.dimension),
@@ -196,7 +195,7 @@ impl<'a> Context<'a> {
         if let Some(index) = site.figures.iter().position(|(figure, ..)| *figure == name.text) {
             let (_, dimension, _) = site.figures[index];
             let formula = Formula::Figure { index: index as u32 };
-            return Some(Built { whole: Some(name.span), ..Built::plain(formula, dimension) });
+            return Some(Built { whole: Some(name.span), ..Built::plain(formula, dimension?) });
         }
         if let Some(quantity) = Quantity::ALL.iter().copied().find(|quantity| quantity.name() == name.text) {
             if quantity == Quantity::Left {
@@ -286,6 +285,33 @@ fn lowered(operator: syntax::Operator) -> Operator {
         syntax::Operator::Multiply => Operator::Multiply,
         syntax::Operator::Divide => Operator::Divide,
         syntax::Operator::Power => Operator::Power,
+    }
+}
+
+/// The value of a formula that reads nothing of the flight.
+pub(super) fn constant(formula: &Formula) -> Option<f64> {
+    match formula {
+        Formula::Number { si } => Some(*si),
+        Formula::Fact { value } => Some(value.si),
+        Formula::Negate { of } => constant(of).map(|of| -of),
+        Formula::Binary { operator, left, right } => {
+            Some(apply_operator(raised(*operator), constant(left)?, constant(right)?))
+        }
+        Formula::Call { function, of } => {
+            let of: Option<Vec<f64>> = of.iter().map(constant).collect();
+            Some(apply_function(*function, &of?))
+        }
+        Formula::Reading { .. } | Formula::Figure { .. } | Formula::At { .. } | Formula::Peak { .. } => None,
+    }
+}
+
+fn raised(operator: Operator) -> syntax::Operator {
+    match operator {
+        Operator::Add => syntax::Operator::Add,
+        Operator::Subtract => syntax::Operator::Subtract,
+        Operator::Multiply => syntax::Operator::Multiply,
+        Operator::Divide => syntax::Operator::Divide,
+        Operator::Power => syntax::Operator::Power,
     }
 }
 

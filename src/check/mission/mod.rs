@@ -39,8 +39,8 @@ pub(super) struct Site<'a> {
     /// Of a start from a pad, rad.
     pub latitude: Option<f64>,
     pub phases: Vec<PhaseBlock<'a>>,
-    /// Figures stated so far.
-    pub figures: Vec<(String, Dimension, String)>,
+    /// Figures stated so far: name, dimension (None where it has errors) and unit.
+    pub figures: Vec<(String, Option<Dimension>, String)>,
 }
 
 /// A phase as it stands in the tree.
@@ -67,8 +67,13 @@ impl<'a> Context<'a> {
     pub(super) fn mission(&mut self, block: BlockId) -> Option<Mission> {
         let before = self.diagnostics.len();
         self.enter(block);
+        self.naming.push(Vec::new());
         let mission = self.mission_within(block);
+        let read = self.naming.pop().unwrap_or_default();
         self.leave();
+        if let Some(mission) = &mission {
+            self.check_knobs(block, &mission.knobs, read);
+        }
         let facts = self.facts_of(block);
         let broken =
             self.definition(block).block.lines.iter().any(|line| matches!(line.statement, Statement::Broken));

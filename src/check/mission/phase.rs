@@ -2,15 +2,15 @@
 
 use super::formula::Speaks;
 use super::{PhaseBlock, Site};
-use crate::check::{Bound, Context, ScopeId, Want};
+use crate::check::{Bound, Context, Inherited, ScopeId, Want};
 use crate::diagnostics::codes::{
-    burn_or_coast, engine_count, foreign_fact, hold_not_by_throttle, missing_fact, throttle_out_of_range,
-    unknown_fact,
+    burn_or_coast, circular_definition, engine_count, foreign_fact, hold_not_by_throttle, missing_fact,
+    throttle_out_of_range, unknown_fact,
 };
 use crate::model::{Burn, Condition, Formula, Hold, Light, Phase, Quantity, Shed, Steer, Value};
 use crate::quantity::Dimension;
 use crate::source::Span;
-use crate::syntax::{self, Because, Expr, Line, Name, Operand, Statement};
+use crate::syntax::{self, Because, Block, BlockKind, Expr, Line, Name, Operand, Statement};
 
 const WORDS: &[&str] = &["burn", "light", "coast", "steer", "throttle", "hold", "until", "shed"];
 
@@ -48,8 +48,9 @@ impl<'a> Context<'a> {
     fn phase(&mut self, site: &Site<'a>, phase: PhaseBlock<'a>) -> Option<Checked> {
         let PhaseBlock { block, scope } = phase;
         let name = block.name.text.as_str();
-        let lines = self.phase_lines(block);
-        let broken = block.lines.iter().any(|line| matches!(line.statement, Statement::Broken));
+        let (stated, whole) = self.lines_with_base(site, block, &mut vec![name]);
+        let lines = self.phase_lines(stated);
+        let broken = !whole;
         match (lines.coast, lines.burns.first(), lines.lights.first()) {
             (Some(coast), Some((_, line)), _) | (Some(coast), None, Some((.., line))) => {
                 self.report(burn_or_coast::both(coast, line.span));
@@ -121,9 +122,57 @@ impl<'a> Context<'a> {
         })
     }
 
-    fn phase_lines(&mut self, block: &'a syntax::Block) -> Lines<'a> {
+    /// The lines of a phase, those that it takes over through `like` included, and whether all of
+    /// them could be read.
+    fn lines_with_base(
+        &mut self,
+        site: &Site<'a>,
+        block: &'a Block,
+        chain: &mut Vec<&'a str>,
+    ) -> (Vec<&'a Line>, bool) {
+        let own = self.once(block);
+        let whole = block.lines.iter().all(|line| !matches!(line.statement, Statement::Broken));
+        let Some(like) = &block.like else { return (own, whole) };
+        let base = match like.text == block.name.text {
+            true => self.phase_before(site, block),
+            false => {
+                self.phase_named(site, like).and_then(|index| site.phases.get(index)).map(|one| one.block)
+            }
+        };
+        let Some(base) = base else { return (own, false) };
+        if base.name.text != block.name.text && chain.contains(&base.name.text.as_str()) {
+            self.report(circular_definition::found(like.span, &like.text, Some(base.name.span)));
+            return (own, false);
+        }
+        chain.push(&base.name.text);
+        let (below, whole_below) = self.lines_with_base(site, base, chain);
+        (self.over(below, own), whole && whole_below)
+    }
+
+    /// The phase of the same name in the mission that this one is like.
+    fn phase_before(&mut self, site: &Site<'a>, block: &'a Block) -> Option<&'a Block> {
+        let definition = self.definition(site.block);
+        let like = block.like.as_ref()?;
+        let base = match &definition.block.like {
+            Some(mission) => {
+                let base = self.find_block(definition.scope, BlockKind::Mission, mission)?;
+                self.lines(base).into_iter().find_map(|Inherited { line, .. }| match &line.statement {
+                    Statement::Block(phase) if phase.name.text == like.text => Some(phase),
+                    _ => None,
+                })
+            }
+            None => None,
+        };
+        let base = base.filter(|base| !std::ptr::eq(*base, block));
+        if base.is_none() {
+            self.report(circular_definition::found(like.span, &like.text, Some(block.name.span)));
+        }
+        base
+    }
+
+    fn phase_lines(&mut self, stated: Vec<&'a Line>) -> Lines<'a> {
         let mut lines = Lines::default();
-        for line in self.once(block) {
+        for line in stated {
             match &line.statement {
                 Statement::Burn(burns) => lines.burns.extend(burns.iter().map(|burn| (burn, line))),
                 Statement::Light { part, at, hot } => lines.lights.push((part, at, *hot, line)),
@@ -249,9 +298,11 @@ impl<'a> Context<'a> {
             return None;
         }
         let path = format!("{phase}.hold");
-        let want = (built.dimension, "the limit of the hold");
-        let limit = self.limit(site, scope, (&path, limit), Speaks::Constant, want, line.because.as_ref())?;
-        Some(Hold { quantity: built.formula, limit, place: self.place(line.span) })
+        let asked = (quantity.span, built.dimension, "the limit of the hold");
+        let because = line.because.as_ref();
+        let held = self.limit_of(site, scope, (&path, limit), Speaks::Constant, asked, because)?;
+        self.require((limit, &held), |limit| limit > 0.0, ("the limit of the hold", "more than zero"))?;
+        Some(Hold { quantity: built.formula, limit: held, place: self.place(line.span) })
     }
 
     fn until(

@@ -1,7 +1,7 @@
 //! The attitude law of a phase.
 
 use super::Site;
-use super::formula::Speaks;
+use super::formula::{Speaks, constant};
 use crate::check::{Context, ScopeId};
 use crate::diagnostics::codes::angle_out_of_range;
 use crate::model::{Formula, PitchLaw, Steer, Value};
@@ -54,6 +54,12 @@ impl<'a> Context<'a> {
                 };
                 let of_heading = part(heading, "heading", angle, "the heading");
                 let (pitch, of_heading) = (pitch?, of_heading?);
+                if let (syntax::PitchLaw::Over { over: stated, .. }, PitchLaw::Over { over, .. }) =
+                    (law, &pitch)
+                {
+                    let words = ("the time of the change", "more than zero");
+                    self.require((stated, over), |time| time > 0.0, words)?;
+                }
                 self.steep(law, &pitch)?;
                 self.angle_of(&of_heading, 360.0, heading, "a heading")?;
                 Steer::Pitch { pitch, heading: of_heading, frozen: *frozen }
@@ -76,11 +82,7 @@ impl<'a> Context<'a> {
     }
 
     fn angle_of(&mut self, formula: &Formula, most: f64, expr: &Expr, what: &str) -> Option<()> {
-        let radians = match formula {
-            Formula::Fact { value } => value.si,
-            Formula::Number { si } => *si,
-            _ => return Some(()),
-        };
+        let Some(radians) = constant(formula) else { return Some(()) };
         if radians.abs() * (180.0 / std::f64::consts::PI) <= most + 1e-9 {
             return Some(());
         }

@@ -95,6 +95,7 @@ codes! {
     unknown_word,
     unlikely_value,
     unreachable_inclination,
+    unused_knob,
     unused_part,
     wrong_arguments,
     wrong_kind,
