@@ -3,6 +3,7 @@
 use super::{ReadError, Reader, compile};
 use crate::check::Compiled;
 
+mod asked;
 mod blocks;
 mod bounds;
 mod engines;
@@ -11,6 +12,7 @@ mod missions;
 mod model;
 mod mutations;
 mod names;
+mod orders;
 mod values;
 
 /// Files held in memory.
