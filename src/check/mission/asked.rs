@@ -270,7 +270,13 @@ impl<'a> Context<'a> {
         if let Some(fact) = self.fact_at(site, scope, path) {
             return Some(Headline::Fact { fact });
         }
-        self.report(unknown_name::found(path.span, "a figure or a fact", text, None));
+        let near = self.nearest(text, |_| site.figures.iter().map(|(name, ..)| name.as_str()).collect());
+        let near = near.map(|near| (near, None));
+        let found = unknown_name::found(path.span, "a figure or a fact", text, near);
+        self.report(match near {
+            Some(_) => found,
+            None => found.help("name a `figure` of this mission, or a fact such as `payload`"),
+        });
         None
     }
 }

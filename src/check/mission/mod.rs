@@ -11,7 +11,7 @@ mod steer;
 
 use super::{BlockId, Bound, Context, Inherited, Key, ScopeId, Stated};
 use crate::diagnostics::codes::{duplicate_name, impossible_epoch, missing_fact, unknown_name};
-use crate::model::{Epoch, Mission, Start, Vehicle, World};
+use crate::model::{Epoch, Mission, Phase, Start, Vehicle, World};
 use crate::quantity::Dimension;
 use crate::source::Span;
 use crate::syntax::{Block, BlockKind, ExprKind, Name, Operand, Statement};
@@ -155,10 +155,12 @@ impl<'a> Context<'a> {
         }
         let flown = self.phases(&site);
         let asked = self.asked(&mut site, &asked);
-        if let Some(flown) = &flown {
+        if let Some(flown) = &flown
+            && !self.incomplete.contains(&block)
+        {
             self.check_order(&site, flown);
         }
-        let (model_phases, asked) = (flown?.into_iter().map(|phase| phase.model).collect(), asked?);
+        let (model_phases, asked) = (sound(flown?)?, asked?);
         let definition = self.definition(block).block;
         let mission = Mission {
             name: definition.name.text.clone(),
@@ -271,4 +273,8 @@ impl<'a> Context<'a> {
         }
         found
     }
+}
+
+fn sound(phases: Vec<phase::Checked>) -> Option<Vec<Phase>> {
+    phases.into_iter().map(|phase| phase.sound.then_some(phase.model)).collect()
 }

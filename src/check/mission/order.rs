@@ -130,7 +130,7 @@ impl<'a> Context<'a> {
                 || phase.model.lights.iter().any(|light| light.part == part)
         };
         let endless = |condition: &Condition| matches!(condition, Condition::Spent { part } if !burns(*part));
-        if phase.model.until.iter().all(endless) {
+        if !phase.model.until.is_empty() && phase.model.until.iter().all(endless) {
             let part = phase.model.until.iter().find_map(|condition| match condition {
                 Condition::Spent { part } => Some(&parts[*part as usize].name),
                 _ => None,

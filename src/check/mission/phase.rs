@@ -14,9 +14,11 @@ use crate::syntax::{self, Because, Block, BlockKind, Expr, Line, Name, Operand, 
 
 const WORDS: &[&str] = &["burn", "light", "coast", "steer", "throttle", "hold", "until", "shed"];
 
-/// A phase with the places of what its rules speak of.
+/// A phase whose parts are all known, with the places of what its rules speak of.
 pub(super) struct Checked {
+    /// Where it is not sound, without what has errors.
     pub model: Phase,
+    pub sound: bool,
     pub name: Span,
     /// One for each burn, with whether it is `hot`.
     pub burns: Vec<(Span, bool)>,
@@ -40,6 +42,7 @@ struct Lines<'a> {
 }
 
 impl<'a> Context<'a> {
+    /// None where it is not known which parts burn or are shed.
     pub(super) fn phases(&mut self, site: &Site<'a>) -> Option<Vec<Checked>> {
         let checked: Vec<_> = site.phases.iter().map(|phase| self.phase(site, *phase)).collect();
         checked.into_iter().collect()
@@ -93,26 +96,24 @@ impl<'a> Context<'a> {
             .iter()
             .map(|(part, when, line)| self.shed(site, scope, name, (part, *when), line))
             .collect();
-        let whole = |throttle: Option<Option<Value>>| match throttle {
-            Some(throttle) => throttle.map(Some),
-            None => Some(None),
-        };
+        if broken {
+            return None;
+        }
+        let sound = steer.is_some() && until.is_some() && throttle != Some(None) && hold != Some(None);
         let model = Phase {
             name: name.to_string(),
             place: self.place(block.name.span),
             burns: burns.into_iter().collect::<Option<_>>()?,
             lights: lights.into_iter().collect::<Option<_>>()?,
-            steer: steer?,
-            throttle: whole(throttle)?,
-            hold: match hold {
-                Some(hold) => Some(hold?),
-                None => None,
-            },
-            until: until?,
+            steer: steer.unwrap_or(Steer::Keep),
+            throttle: throttle.flatten(),
+            hold: hold.flatten(),
+            until: until.unwrap_or_default(),
             sheds: sheds.into_iter().collect::<Option<_>>()?,
         };
         Some(Checked {
             model,
+            sound,
             name: block.name.span,
             burns: lines.burns.iter().map(|(burn, _)| (burn.part.span, burn.hot)).collect(),
             lights: lines.lights.iter().map(|(part, _, hot, _)| (part.span, *hot)).collect(),

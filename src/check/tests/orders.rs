@@ -135,3 +135,18 @@ fn phases_are_defined_by_difference() {
     let circle = "phase A like B { until 1 s }\nphase B like A { until 1 s }\n";
     assert!(flown(&format!("{UP}{circle}{rest}")).contains(&"circular-definition"));
 }
+
+#[test]
+fn a_fault_elsewhere_does_not_hide_the_order() {
+    let odd =
+        "phase Up { burn Sedge, Pair; steer upright; throttle 20 %; until height >= 3 kg; shed Sedge }\n";
+    let drop = "phase Drop { burn Sedge; steer upright; until 1 s }\n";
+    let mut found = flown(&format!("{odd}{drop}{NEXT}"));
+    found.sort_unstable();
+    assert_eq!(found, ["already-shed", "dimension-mismatch", "still-carried", "throttle-out-of-range"]);
+    // Where it is not known what is shed, nothing is said of what follows from it.
+    let unknown = "phase Up { burn Sedge, Pair; steer upright; until 3 s; shed Sdge; shed Pair }\n";
+    assert_eq!(flown(&format!("{unknown}{NEXT}")), ["unknown-name"]);
+    let unreadable = "phase Up { burn Sedge, Pair; steer upright; until 3 s; shed }\n";
+    assert_eq!(flown(&format!("{unreadable}{NEXT}")).len(), 1);
+}
