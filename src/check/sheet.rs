@@ -154,7 +154,8 @@ impl<'a> Context<'a> {
         Sheet { block, name: &definition.name.text, span: definition.name.span, lines }
     }
 
-    fn check_form(&mut self, setting: &Setting, key: Key) {
+    /// Reports parts of a setting that its key does not have.
+    pub(super) fn check_form(&mut self, setting: &Setting, key: Key) {
         let mut wrong = Vec::new();
         if let Some(word) = &setting.word
             && key.words.is_empty()

@@ -9,7 +9,7 @@ use crate::diagnostics::codes::{
 use crate::model::{Edge, Formula, Gravity, Operator, Quantity, QuantityKind, Reading, Surface, Value};
 use crate::quantity::Dimension;
 use crate::source::Span;
-use crate::syntax::{self, Expr, ExprKind, Name, Path, Statement};
+use crate::syntax::{self, Expr, ExprKind, Name, Path};
 
 /// A formula with what its place has to know of it.
 pub(super) struct Built {
@@ -249,12 +249,10 @@ impl<'a> Context<'a> {
     fn not_yet_shed(&mut self, site: &Site<'a>, span: Span, of: &Formula, phase: u32) -> Option<()> {
         for part in parts_read(of) {
             let name = &site.vehicle.parts.get(part as usize)?.name;
-            let before = site.phases.iter().take(phase as usize).flat_map(|phase| &phase.block.lines);
-            let shed = before
-                .into_iter()
-                .find(|line| matches!(&line.statement, Statement::Shed { part, .. } if part.text == *name));
-            if let Some(shed) = shed {
-                self.report(absent_quantity::after_shed(span, name, shed.span));
+            if let Some((_, shed)) =
+                site.sheds.get(name.as_str()).filter(|(before, _)| *before < phase as usize)
+            {
+                self.report(absent_quantity::after_shed(span, name, *shed));
                 return None;
             }
         }

@@ -9,8 +9,10 @@ mod phase;
 mod start;
 mod steer;
 
+use std::collections::BTreeMap;
+
 use super::{BlockId, Bound, Context, Inherited, Key, ScopeId, Stated};
-use crate::diagnostics::codes::{duplicate_name, impossible_epoch, missing_fact, unknown_name};
+use crate::diagnostics::codes::{impossible_epoch, missing_fact, unknown_name};
 use crate::model::{Epoch, Mission, Phase, Start, Vehicle, World};
 use crate::quantity::Dimension;
 use crate::source::Span;
@@ -39,6 +41,8 @@ pub(super) struct Site<'a> {
     /// Of a start from a pad, rad.
     pub latitude: Option<f64>,
     pub phases: Vec<PhaseBlock<'a>>,
+    /// The first phase that sheds a part of this name, and where it says so.
+    pub sheds: BTreeMap<&'a str, (usize, Span)>,
     /// Figures stated so far: name, dimension (None where it has errors) and unit.
     pub figures: Vec<(String, Option<Dimension>, String)>,
 }
@@ -123,7 +127,6 @@ impl<'a> Context<'a> {
             self.bounded(value, Bound::NotNegative, "the adapter")
         });
         let epoch = sheet.get("epoch").and_then(|stated| self.epoch(&stated));
-        self.same_names(&phases);
         if phases.is_empty() {
             self.missing(block, "a phase", "phase Rise { burn Bracken; steer upright; until 6 s }");
         }
@@ -136,6 +139,7 @@ impl<'a> Context<'a> {
             world: world?,
             within,
             latitude: None,
+            sheds: sheds(&phases),
             phases,
             figures: Vec::new(),
         };
@@ -230,16 +234,6 @@ impl<'a> Context<'a> {
         }
     }
 
-    /// Two phases of one name stand in the way of `at end of`.
-    fn same_names(&mut self, phases: &[PhaseBlock<'a>]) {
-        for (index, phase) in phases.iter().enumerate() {
-            let name = &phase.block.name;
-            if let Some(first) = phases[..index].iter().find(|first| first.block.name.text == name.text) {
-                self.report(duplicate_name::found(name.span, &name.text, first.block.name.span));
-            }
-        }
-    }
-
     /// A part of the vehicle by its name.
     fn part(&mut self, site: &Site<'a>, name: &Name) -> Option<usize> {
         let found = site.part(&name.text);
@@ -277,4 +271,16 @@ impl<'a> Context<'a> {
 
 fn sound(phases: Vec<phase::Checked>) -> Option<Vec<Phase>> {
     phases.into_iter().map(|phase| phase.sound.then_some(phase.model)).collect()
+}
+
+fn sheds<'a>(phases: &[PhaseBlock<'a>]) -> BTreeMap<&'a str, (usize, Span)> {
+    let mut first = BTreeMap::new();
+    for (index, phase) in phases.iter().enumerate() {
+        for line in &phase.block.lines {
+            if let Statement::Shed { part, .. } = &line.statement {
+                first.entry(part.text.as_str()).or_insert((index, line.span));
+            }
+        }
+    }
+    first
 }

@@ -161,7 +161,7 @@ impl<'a> Context<'a> {
             }
             let spent = matches!(shed.when, Some(Condition::Spent { part: of }) if of == shed.part);
             if shed.when.is_some() && !spent && state.burning.contains(&part) {
-                self.report(shed_while_burning::found(span, name));
+                self.report(shed_while_burning::found(span, name, state.lit[part].0));
             }
             for (other, carried) in parts.iter().enumerate() {
                 let beside = matches!(carried.role, Role::Beside { carrier } if carrier as usize == part);

@@ -2,7 +2,7 @@
 
 use super::formula::Speaks;
 use super::{PhaseBlock, Site};
-use crate::check::{Bound, Context, Inherited, ScopeId, Want};
+use crate::check::{Bound, Context, Inherited, Key, ScopeId, Want};
 use crate::diagnostics::codes::{
     burn_or_coast, circular_definition, engine_count, foreign_fact, hold_not_by_throttle, missing_fact,
     throttle_out_of_range, unknown_fact,
@@ -13,6 +13,8 @@ use crate::source::Span;
 use crate::syntax::{self, Because, Block, BlockKind, Expr, Line, Name, Operand, Statement};
 
 const WORDS: &[&str] = &["burn", "light", "coast", "steer", "throttle", "hold", "until", "shed"];
+
+const THROTTLE: Key = Key::new("throttle", "throttle  70 %");
 
 /// A phase whose parts are all known, with the places of what its rules speak of.
 pub(super) struct Checked {
@@ -182,13 +184,17 @@ impl<'a> Context<'a> {
                 Statement::Hold { quantity, limit } => lines.hold = Some((quantity, limit, line)),
                 Statement::Until(conditions) => lines.until = Some((conditions, line)),
                 Statement::Shed { part, when } => lines.sheds.push((part, when.as_ref(), line)),
-                Statement::Setting(setting) if setting.key.text == "throttle" => match &setting.value {
-                    Some(Operand::Expr(expr)) => lines.throttle = Some((expr, line)),
-                    _ => {
-                        let example = "throttle  70 %";
-                        self.report(missing_fact::no_value(setting.key.span, "the throttle", example));
+                Statement::Setting(setting) if setting.key.text == THROTTLE.name => {
+                    self.check_form(setting, THROTTLE);
+                    match &setting.value {
+                        Some(Operand::Expr(expr)) => lines.throttle = Some((expr, line)),
+                        Some(Operand::Instant(_)) => {}
+                        None => {
+                            let key = setting.key.span;
+                            self.report(missing_fact::no_value(key, "the throttle", THROTTLE.example));
+                        }
                     }
-                },
+                }
                 Statement::Setting(setting) => {
                     let near = self.nearest(&setting.key.text, |_| WORDS.to_vec());
                     let key = &setting.key;

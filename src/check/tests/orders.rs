@@ -106,6 +106,8 @@ fn a_phase_says_what_it_does_and_can_end() {
     let burn = |rest: &str| with(&format!("phase Odd {{ burn Sedge; steer upright; until 1 s; {rest} }}"));
     assert_eq!(burn("throttle 30 %"), ["throttle-out-of-range"]);
     assert_eq!(burn("throttle 60 %"), Vec::<&str>::new());
+    assert_eq!(burn("throttle 60 % .. 80 %"), ["unexpected-part"]);
+    assert_eq!(burn("throttle"), ["missing-fact"]);
     assert_eq!(burn("hold height <= 3 m by throttle"), ["hold-not-by-throttle"]);
     assert_eq!(burn("hold thrust <= 3 m by throttle"), ["dimension-mismatch"]);
     let engines = |count: &str| {

@@ -40,7 +40,12 @@ mission Hop {
 "#,
 };
 
-pub fn found(span: Span, part: &str) -> Diagnostic {
-    CODE.at(span, format!("`{part}` is shed while it burns"), "let go of in this phase, which burns it")
-        .help(format!("shed it at the phase's end (`shed {part}`), when it is spent (`shed {part} when {part} spent`), or in a later phase"))
+/// `lit` is where it was lit.
+pub fn found(span: Span, part: &str, lit: Option<Span>) -> Diagnostic {
+    let found = CODE.at(span, format!("`{part}` is shed while it burns"), "let go of in this phase, which burns it");
+    let found = match lit {
+        Some(lit) => found.and(lit, "lit here"),
+        None => found,
+    };
+    found.help(format!("shed it at the phase's end (`shed {part}`), when it is spent (`shed {part} when {part} spent`), or in a later phase"))
 }
