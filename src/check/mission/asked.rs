@@ -29,6 +29,13 @@ impl<'a> Context<'a> {
         let mut asked = Asked::default();
         let mut sound = true;
         let mut names: BTreeMap<&'a str, Span> = BTreeMap::new();
+        site.figure_names = lines
+            .iter()
+            .filter_map(|line| match &line.line.statement {
+                Statement::Figure { name, .. } => Some((name.text.as_str(), name.span)),
+                _ => None,
+            })
+            .collect();
         // Figures first: demands and aims may name them, wherever they stand.
         for line in lines {
             if let Statement::Figure { name, value } = &line.line.statement {
@@ -97,6 +104,9 @@ impl<'a> Context<'a> {
         name: &syntax::Name,
         value: &Expr,
     ) -> Option<Figure> {
+        if Quantity::ALL.iter().any(|quantity| quantity.name() == name.text) {
+            self.report(duplicate_name::quantity(name.span, &name.text));
+        }
         let Some(built) = self.formula(site, line.scope, value, Speaks::Whole) else {
             site.figures.push((name.text.clone(), None, String::new()));
             return None;

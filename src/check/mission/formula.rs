@@ -212,6 +212,15 @@ impl<'a> Context<'a> {
             let (si, dimension) = self.facts.get(fact.0 as usize).map(|fact| (fact.si, fact.dimension))?;
             return Some(Built::plain(self.fact_formula(Value { si, fact }), dimension));
         }
+        if let Some(defined) = site.figure_names.get(name.text.as_str()) {
+            let kind = "a figure that stands further up";
+            self.report(
+                unknown_name::found(name.span, kind, &name.text, None)
+                    .and(*defined, "it stands here")
+                    .help("a figure names only those above it: move this one down"),
+            );
+            return None;
+        }
         let near =
             self.nearest(&name.text, |_| Quantity::ALL.iter().map(|quantity| quantity.name()).collect());
         match near {

@@ -43,6 +43,8 @@ pub(super) struct Site<'a> {
     pub phases: Vec<PhaseBlock<'a>>,
     /// The first phase that sheds a part of this name, and where it says so.
     pub sheds: BTreeMap<&'a str, (usize, Span)>,
+    /// Every figure of the mission, and where its name stands.
+    pub figure_names: BTreeMap<&'a str, Span>,
     /// Figures stated so far: name, dimension (None where it has errors) and unit.
     pub figures: Vec<(String, Option<Dimension>, String)>,
 }
@@ -140,6 +142,7 @@ impl<'a> Context<'a> {
             within,
             latitude: None,
             sheds: sheds(&phases),
+            figure_names: BTreeMap::new(),
             phases,
             figures: Vec::new(),
         };

@@ -117,6 +117,36 @@ fn a_broken_figure_is_reported_once() {
 }
 
 #[test]
+fn figures_name_those_above_them() {
+    assert_eq!(on_moon("figure A = B * 2\n figure B = mass at end of Up"), ["unknown-name"]);
+    assert_eq!(on_moon("figure A = A * 2"), ["unknown-name"]);
+    assert_eq!(on_moon("figure mass = thrust at end of Up"), ["duplicate-name"]);
+    assert_eq!(on_moon("demand B >= 1 kg\n figure B = mass at end of Up"), CLEAN);
+}
+
+#[test]
+fn missions_are_defined_by_difference() {
+    let mut compiled = hop(
+        "Moon",
+        PAD,
+        "demand Top altitude at end of Drift >= 1 m\n}
+        mission Higher like Hop {
+            payload  200 kg
+            given    slope  60 deg
+            phase Up like Up { until height >= 90 m }
+            demand   Top altitude at end of Drift >= 2 m",
+    );
+    assert_eq!(codes(&compiled), CLEAN);
+    let model = compiled.model.take().unwrap();
+    let [first, second] = model.missions.as_slice() else { panic!() };
+    assert_eq!((first.payload.si, second.payload.si), (100.0, 200.0));
+    assert_eq!(second.phases.len(), 2);
+    assert_eq!(first.phases[0].burns, second.phases[0].burns);
+    assert_ne!(first.phases[0].until, second.phases[0].until);
+    assert_eq!(second.demands.len(), 1);
+}
+
+#[test]
 fn every_number_has_an_address() {
     let compiled = hop("Moon", PAD, "demand Top altitude at end of Drift >= 1 m");
     let model = compiled.model.unwrap();

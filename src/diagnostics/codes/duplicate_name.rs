@@ -57,3 +57,9 @@ pub fn part(span: Span, name: &str, first: Span) -> Diagnostic {
         .and(first, "first stands here")
         .help(format!("define a second one by difference, such as `stage {name}B like {name} {{ }}`"))
 }
+
+/// A figure of the name of a flight quantity.
+pub fn quantity(span: Span, name: &str) -> Diagnostic {
+    CODE.at(span, format!("`{name}` is a flight quantity already"), "named again here")
+        .help("choose another name, so that a formula can tell them apart")
+}
