@@ -2,6 +2,9 @@
 
 /// Intervals that are looked at before the best of them is searched closely.
 const LOOKS: usize = 12;
+/// Sections of the interval between two looks: down to half the digits of a number. A count and not
+/// a width, because the width of a very short interval is lost in the digits of its ends.
+const SECTIONS: usize = 40;
 /// Golden section: the ratio of the lesser part to the whole.
 const GOLDEN: f64 = 0.381_966_011_250_105_1;
 
@@ -26,7 +29,7 @@ pub fn maximum(start: f64, end: f64, mut f: impl FnMut(f64) -> f64) -> (f64, f64
     let mut inner = low + GOLDEN * (high - low);
     let mut outer = high - GOLDEN * (high - low);
     let (mut at_inner, mut at_outer) = (f(inner), f(outer));
-    while high - low > 1e-9 * (end - start) {
+    for _ in 0..SECTIONS {
         if at_inner >= at_outer {
             high = outer;
             (outer, at_outer) = (inner, at_inner);

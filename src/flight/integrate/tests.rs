@@ -132,6 +132,14 @@ fn a_double_crossing_within_a_step_is_seen() {
     assert!(crossings(0.0, 1.0, -1.0, true, |_| -1.0).is_none());
 }
 
+/// An interval of a few units in the last place ends the search like any other.
+#[test]
+fn a_very_short_interval_is_searched_in_bounded_time() {
+    let (start, end) = (400.0, 400.0 + 2e-13);
+    let (time, _) = maximum(start, end, |t| -(t - 400.0));
+    assert_eq!(time, start);
+}
+
 #[test]
 fn a_summit_and_a_corner_are_found() {
     let (time, value) = maximum(0.0, 3.0, |t| libm::sin(t));
