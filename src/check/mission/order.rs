@@ -122,6 +122,7 @@ impl<'a> Context<'a> {
                 if let Some(shed) = state.shed[part as usize] {
                     let name = &parts[part as usize].name;
                     self.report(absent_quantity::after_shed(phase.until, name, shed));
+                    return;
                 }
             }
         }

@@ -41,6 +41,8 @@ fn what_is_gone_neither_burns_nor_goes_again() {
     );
     let asked = "phase Late { coast; until Sedge.left <= 3 kg }";
     assert_eq!(flown(&format!("{UP}{drop}{NEXT}{asked}")), ["absent-quantity"]);
+    let asked = "phase Late { coast; until Sedge spent }";
+    assert_eq!(flown(&format!("{UP}{drop}{NEXT}{asked}")), ["absent-quantity"]);
     let asked = "demand Sedge.left at end of Next >= 0 kg";
     assert_eq!(flown(&format!("{UP}{drop}{NEXT}{asked}")), ["absent-quantity"]);
 }
