@@ -1,7 +1,11 @@
 //! The report in Markdown that any forge renders.
 
-mod sections;
+mod course;
+mod foundation;
+mod ledger;
+mod outcome;
 mod table;
+mod vehicle;
 
 use super::content::Report;
 use super::show::Show;
@@ -11,20 +15,20 @@ use crate::quantity::System;
 pub fn markdown(report: &Report, system: System, pictures: &[&str]) -> String {
     let show = Show { system };
     let parts = [
-        sections::head(report),
-        sections::verdict(report, &show),
-        sections::figures(report, &show),
-        sections::pictures(pictures),
-        sections::mass(report, &show),
-        sections::stages(report, &show),
-        sections::ledger(report),
-        sections::timeline(report, &show),
-        sections::peaks(report, &show),
-        sections::end(report, &show),
-        sections::propellant(report, &show),
-        sections::assumptions(report),
-        sections::warnings(report),
-        sections::caution(report),
+        outcome::head(report),
+        outcome::verdict(report, &show),
+        outcome::figures(report, &show),
+        outcome::pictures(pictures),
+        vehicle::mass(report, &show),
+        vehicle::stages(report, &show),
+        ledger::ledger(report),
+        course::timeline(report, &show),
+        course::peaks(report, &show),
+        course::end(report, &show),
+        vehicle::propellant(report, &show),
+        foundation::assumptions(report),
+        foundation::warnings(report),
+        foundation::caution(report),
     ];
     let mut page = parts.into_iter().filter(|part| !part.is_empty()).collect::<Vec<_>>().join("\n");
     if !page.ends_with('\n') {
