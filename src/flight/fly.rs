@@ -104,10 +104,16 @@ fn summits<S: Scalar>(plan: &Plan<S>, history: &History<S>) -> Vec<Peak> {
 fn sample<S: Scalar>(history: &History<S>) -> Vec<Snapshot> {
     let legs = history.legs();
     let pieces = SAMPLES.div_ceil(legs.len().max(1)).clamp(1, 50);
+    // Of a very long flight every so many steps tell enough, beside those at which something jumps.
+    let stride = legs.len().div_ceil(10 * SAMPLES);
     let mut samples = Vec::with_capacity(legs.len() * (pieces + 1));
     for (index, leg) in legs.iter().enumerate() {
         // Where nothing jumps the end of a step is the start of the next.
         let joined = index > 0 && history.joined(&legs[index - 1], leg);
+        let goes_on = legs.get(index + 1).is_some_and(|next| history.joined(leg, next));
+        if joined && goes_on && index % stride != 0 {
+            continue;
+        }
         for piece in usize::from(joined)..=pieces {
             let time = leg.start() + (leg.end() - leg.start()) * piece as f64 / pieces as f64;
             samples.push(history.snapshot(leg, if piece == pieces { leg.end() } else { time }));

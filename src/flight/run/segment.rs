@@ -11,8 +11,8 @@ use crate::math::{Scalar, Vector};
 
 /// A phase that goes on longer than this never ends, s.
 pub(super) const LONGEST_PHASE: f64 = 400.0 * 86_400.0;
-/// More steps than this in one segment, and it never ends.
-const MOST_STEPS: u64 = 2_000_000;
+/// More steps than this in the whole flight, and it never ends: a month in a low orbit takes a sixth.
+const MOST_STEPS: u64 = 120_000;
 /// So far below the ground nothing flies, m.
 const SUNK: f64 = 1.0;
 
@@ -34,7 +34,7 @@ impl<S: Scalar> Run<'_, '_, S> {
         let mut values = watches.values(&Look::new(&motion, self.time, &state));
         let limit = stops.pop().unwrap_or(self.time);
         while self.time.real() < limit.real() {
-            if stepper.steps() > MOST_STEPS {
+            if self.book.steps + stepper.steps() > MOST_STEPS {
                 self.settle(&stepper);
                 let after = (self.time - self.motion.phase_start).real();
                 return Err(self.failure(Cause::NeverEnds { after }));
