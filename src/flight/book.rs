@@ -133,13 +133,14 @@ impl<'p, S: Scalar> Book<'p, S> {
     /// Notes by how much a hold's limit is exceeded; the worst of a phase stays.
     pub fn exceeded(&mut self, phase: usize, excess: f64, limit: f64, time: f64) {
         for notice in &mut self.notices {
-            if let Notice::HoldExceeded { phase: of, worst, time: at, .. } = notice {
-                if *of == phase {
+            match notice {
+                Notice::HoldExceeded { phase: of, worst, time: at, .. } if *of == phase => {
                     if excess > *worst {
                         (*worst, *at) = (excess, time);
                     }
                     return;
                 }
+                _ => {}
             }
         }
         self.notices.push(Notice::HoldExceeded { phase, worst: excess, limit, time });

@@ -53,8 +53,7 @@ pub fn search<S: Scalar>(history: &History<S>, wanted: &[Wanted<S>]) -> Vec<Opti
 fn climb<S: Scalar>(history: &History<S>, wanted: &Wanted<S>, best: usize) -> Summit {
     let legs = history.legs();
     let mut summit = Summit { value: f64::NEG_INFINITY, time: 0.0, leg: best, corner: false };
-    for index in best.saturating_sub(1)..=(best + 1).min(legs.len() - 1) {
-        let leg = &legs[index];
+    for (index, leg) in legs.iter().enumerate().skip(best.saturating_sub(1)).take(best.min(1) + 2) {
         if wanted.phase.is_some_and(|only| only != history.phase(leg)) {
             continue;
         }

@@ -62,13 +62,11 @@ impl<S: Scalar> Watches<S> {
             knots,
         };
         if let (Drag::Curve { table, .. }, Some(low), Some(high)) =
-            (&motion.plan.drag, watches.knots.first(), watches.knots.last())
+            (&motion.plan.drag, watches.knots.first().copied(), watches.knots.last().copied())
+            && table.refuses()
         {
-            if table.refuses() {
-                let (low, high) = (*low, *high);
-                watches.list.push(Watch::Range { above: false, limit: low });
-                watches.list.push(Watch::Range { above: true, limit: high });
-            }
+            watches.list.push(Watch::Range { above: false, limit: low });
+            watches.list.push(Watch::Range { above: true, limit: high });
         }
         watches
     }
@@ -88,7 +86,7 @@ impl<S: Scalar> Watches<S> {
             Watch::Spent(index) => match (motion.lit.get(index), self.burnable.get(index)) {
                 (Some(lit), Some(burnable)) => {
                     let part = &motion.plan.parts[lit.part];
-                    (*burnable - part.usable + look.left(lit.part)).real() * -1.0
+                    -(*burnable - part.usable + look.left(lit.part)).real()
                 }
                 _ => -1.0,
             },

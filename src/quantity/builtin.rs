@@ -85,7 +85,7 @@ pub const UNITS: &[Row] = &[
     plain("psi", Dimension::PRESSURE, POUND_FORCE / (INCH * INCH)),
     plain("psf", Dimension::PRESSURE, POUND_FORCE / (FOOT * FOOT)),
     si("J", Dimension::ENERGY, 1.0),
-    plain("Btu", Dimension::ENERGY, 1055.055_852_62),
+    plain("Btu", Dimension::ENERGY, 1_055.055_852_62),
     si("W", Dimension::POWER, 1.0),
     plain("hp", Dimension::POWER, 550.0 * FOOT * POUND_FORCE),
     si("L", Dimension::VOLUME, 1e-3),

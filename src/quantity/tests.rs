@@ -31,15 +31,15 @@ fn masses_and_forces() {
     close(si(1.0, "kgf"), 9.80665, 0.0);
     close(si(1.0, "slug"), 14.593_902_937_2, 1e-11);
     close(si(1.0, "short_ton"), 907.184_74, 1e-15);
-    close(si(1.0, "long_ton"), 1016.046_908_8, 1e-15);
+    close(si(1.0, "long_ton"), 1_016.046_908_8, 1e-15);
     // Impulse of 1000 lbf·s read as N·s: the factor of the Mars Climate Orbiter Mishap Investigation
     // Board's Phase I Report (1999).
-    close(si(1000.0, "lbf*s"), 4448.221_62, 2e-9);
+    close(si(1000.0, "lbf*s"), 4_448.221_62, 2e-9);
 }
 
 #[test]
 fn pressures_and_densities() {
-    close(si(1.0, "psi"), 6894.757_293_17, 1e-11);
+    close(si(1.0, "psi"), 6_894.757_293_17, 1e-11);
     close(si(1.0, "psf"), 47.880_258_980_3, 1e-11);
     close(si(1.0, "atm"), 101_325.0, 0.0);
     close(si(1.0, "lbm/ft^3"), 16.018_463_374, 1e-10);
@@ -49,7 +49,7 @@ fn pressures_and_densities() {
 
 #[test]
 fn heat_speed_and_volume() {
-    close(si(1.0, "Btu"), 1055.055_852_62, 1e-15);
+    close(si(1.0, "Btu"), 1_055.055_852_62, 1e-15);
     close(si(1.0, "Btu/ft^2/s"), 11_356.526_7, 1e-8);
     // The customary limit of free-molecular heating at fairing release, 0.1 Btu/(ft²·s).
     close(si(0.1, "Btu/ft^2/s"), 1135.653, 1e-6);
@@ -72,7 +72,7 @@ fn temperatures_are_readings() {
 fn specific_impulse() {
     close(si(300.0, "s") * si(1.0, "g0"), 2941.995, 1e-15);
     close(si(300.0, "lbf*s/lbm"), 2941.995, 1e-14);
-    close(si(2941.995, "m/s") / si(1.0, "ft/s"), 9652.214_567, 1e-9);
+    close(si(2941.995, "m/s") / si(1.0, "ft/s"), 9_652.214_567, 1e-9);
 }
 
 #[test]

@@ -118,7 +118,7 @@ fn every_explained_example_is_true() {
     let folder = tempfile::tempdir().unwrap();
     let mut faults = Vec::new();
     for code in codes::ALL {
-        let mut say = |source: &str| {
+        let say = |source: &str| {
             fs::write(folder.path().join("example.wright"), source).unwrap();
             said(&stagewright(folder.path(), &["fly", "--format", "json", "example.wright"]))
         };

@@ -143,8 +143,7 @@ impl<S: Scalar> Stepper<S> {
                 grow = 1.0;
                 continue;
             }
-            let factor =
-                if error == 0.0 { GROW } else { (SAFETY * (-ORDER * error.ln()).exp()).clamp(SHRINK, GROW) };
+            let factor = if error == 0.0 { GROW } else { (SAFETY * error.power(-ORDER)).clamp(SHRINK, GROW) };
             if error <= 1.0 {
                 let next = taken.real() * factor.min(grow);
                 // A step cut short by the limit says little against the size that was meant.

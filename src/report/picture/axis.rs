@@ -66,8 +66,8 @@ pub fn simplified(points: &[(f64, f64)]) -> Vec<(f64, f64)> {
         let (Some(a), Some(b)) = (points.get(from), points.get(to)) else { break };
         (keep[from], keep[to]) = (true, true);
         let mut worst = (NEAR, None);
-        for index in from + 1..to {
-            let away = distance(points[index], *a, *b);
+        for (index, point) in points.iter().enumerate().take(to).skip(from + 1) {
+            let away = distance(*point, *a, *b);
             if away > worst.0 {
                 worst = (away, Some(index));
             }
