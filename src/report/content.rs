@@ -262,5 +262,8 @@ pub struct Fact {
     pub path: String,
     pub si: f64,
     pub written: String,
+    /// File, relative to the mission's where it lies in or under the same folder, and line; of a
+    /// default, where the block stands that lacks it.
+    pub place: String,
     pub because: Option<String>,
 }

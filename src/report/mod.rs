@@ -2,6 +2,7 @@
 
 mod assemble;
 mod content;
+mod inert;
 mod json;
 mod markdown;
 mod notices;

@@ -29,6 +29,19 @@ impl Show {
         }
     }
 
+    /// A number in SI with its unit, no finer than a thousandth of the tolerance that it is held to.
+    pub fn within(&self, si: f64, tolerance: f64, unit: &str) -> String {
+        let Ok(parsed) = UnitTable::builtin().parse(unit) else { return self.with_unit(si, unit, DIGITS) };
+        let finest = tolerance.abs() / parsed.factor / 1e3;
+        let mut decimals = 0;
+        let mut step = 1.0;
+        while step > finest && decimals < 9 {
+            step /= 10.0;
+            decimals += 1;
+        }
+        format!("{} {unit}", format_fixed(parsed.from_si(si), decimals)).trim().to_owned()
+    }
+
     /// A difference of two numbers: without the offset of a thermometer.
     pub fn difference(&self, si: f64, unit: &str, digits: usize) -> String {
         match UnitTable::builtin().parse(unit) {

@@ -1,6 +1,7 @@
 //! The verdict, the ledger and the timeline for a terminal.
 
 use super::content::{LedgerLine, Report};
+use super::inert::is_harmful;
 use crate::quantity::{format_fixed, format_number};
 
 /// Plain text in columns; text of the source has no control characters left in it.
@@ -58,7 +59,7 @@ fn line(line: &LedgerLine) -> Vec<String> {
 }
 
 fn inert(text: &str) -> String {
-    text.chars().map(|c| if c.is_control() { '\u{fffd}' } else { c }).collect()
+    text.chars().map(|c| if is_harmful(c) { '\u{fffd}' } else { c }).collect()
 }
 
 /// Rows in columns, the first `left` of them aligned left and the rest right.

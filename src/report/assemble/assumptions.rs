@@ -1,7 +1,7 @@
 //! What the numbers rest on.
 
 use crate::flight::{Flight, Frame};
-use crate::model::{self, Drag, Gravity, Mission, Origin};
+use crate::model::{self, Drag, Gravity, Mission, Origin, Place};
 use crate::report::content::{Assumptions, Fact};
 
 pub fn assumptions(mission: &Mission, facts: &[model::Fact], flight: &Flight, tolerance: f64) -> Assumptions {
@@ -10,6 +10,7 @@ pub fn assumptions(mission: &Mission, facts: &[model::Fact], flight: &Flight, to
         path: fact.path.clone(),
         si: fact.si,
         written: if fact.written.is_empty() { default_text(fact) } else { fact.written.clone() },
+        place: place(&mission.place, &fact.place),
         because: fact.because.clone(),
     };
     let written = |fact: &&&model::Fact| matches!(fact.origin, Origin::Stated | Origin::Given);
@@ -19,6 +20,13 @@ pub fn assumptions(mission: &Mission, facts: &[model::Fact], flight: &Flight, to
         defaults: used.iter().filter(|fact| fact.origin == Origin::Default).map(line).collect(),
         conventions: conventions(mission, flight, tolerance),
     }
+}
+
+/// File and line, the file as it is called from the folder of the mission's.
+fn place(mission: &Place, fact: &Place) -> String {
+    let folder = mission.file.rfind('/').and_then(|slash| mission.file.get(..=slash)).unwrap_or("");
+    let file = fact.file.strip_prefix(folder).unwrap_or(&fact.file);
+    format!("{file}:{}", fact.line)
 }
 
 fn default_text(fact: &model::Fact) -> String {

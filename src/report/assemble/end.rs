@@ -2,7 +2,7 @@
 
 use super::state;
 use crate::flight::{Flight, Snapshot};
-use crate::model::{Mission, Quantity};
+use crate::model::{Gravity, Mission, Quantity};
 use crate::report::content::{End, Orbit};
 use crate::world::mean_solar_time;
 
@@ -16,8 +16,8 @@ pub fn end(mission: &Mission, flight: &Flight) -> End {
 
 fn orbit(mission: &Mission, last: &Snapshot) -> Option<Orbit> {
     let node_rad = last.get(Quantity::Node)?;
-    // The epoch sets the Earth's angle, so that the node's local time means something there.
-    let date = mission.epoch.as_ref().map(|epoch| epoch.julian_date + last.time / 86_400.0);
+    let epoch = mission.epoch.as_ref().filter(|_| is_earth(mission));
+    let date = epoch.map(|epoch| epoch.julian_date + last.time / 86_400.0);
     Some(Orbit {
         apogee_m: last.get(Quantity::Apogee),
         perigee_m: last.get(Quantity::Perigee)?,
@@ -30,4 +30,12 @@ fn orbit(mission: &Mission, last: &Snapshot) -> Option<Orbit> {
         period_s: last.get(Quantity::Period),
         mean_local_time_of_node_s: date.map(|date| mean_solar_time(node_rad, date)),
     })
+}
+
+/// The mean sun that local time counts by is the Earth's alone: on any other body there is none.
+fn is_earth(mission: &Mission) -> bool {
+    let near = |value: f64, earth: f64| (value / earth - 1.0).abs() < 0.01;
+    let Gravity::Central { mu, .. } = &mission.world.gravity else { return false };
+    // WGS 84 (NGA.STND.0036), table 3.1.
+    near(mu.si, 3.986004418e14) && near(mission.world.spin.si, 7.292115e-5)
 }

@@ -10,13 +10,16 @@ pub fn assumptions(report: &Report) -> String {
         if facts.is_empty() {
             return;
         }
-        let mut table =
-            Table::new(if reasons { &["fact", "value", "because"] } else { &["fact", "value"] }, &[]);
+        let mut table = Table::new(
+            if reasons { &["fact", "value", "because", "place"] } else { &["fact", "value", "place"] },
+            &[],
+        );
         for fact in facts {
             let mut cells = vec![code(&fact.path), code(&fact.written)];
             if reasons {
                 cells.push(fact.because.as_deref().map_or_else(String::new, plain));
             }
+            cells.push(code(&fact.place));
             table.row(cells);
         }
         text.push_str(&format!("\n### {title}\n\n{}", table.render()));

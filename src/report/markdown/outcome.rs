@@ -55,7 +55,8 @@ pub fn verdict(report: &Report, show: &Show) -> String {
     }
     let mut aims = Table::new(&["aim", "outcome"], &["value".into(), "target".into(), "tolerance".into()]);
     for aim in &verdict.aims {
-        let value = aim.value.map_or_else(|| "n/a".to_owned(), |si| show.with_unit(si, &aim.unit, 8));
+        let value =
+            aim.value.map_or_else(|| "n/a".to_owned(), |si| show.within(si, aim.tolerance, &aim.unit));
         let tolerance = format!("{} {}", show.difference(aim.tolerance, &aim.unit, 3), aim.unit);
         aims.row(vec![
             code(&aim.quantity),

@@ -1,5 +1,7 @@
 //! Tables, and text made harmless for Markdown.
 
+use crate::report::inert::is_harmful;
+
 /// Which way a column leans.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
 pub enum Lean {
@@ -56,38 +58,49 @@ impl Table {
 /// Text of a source as plain text within a line or a cell: nothing in it is markup, and nothing
 /// breaks the line.
 pub fn plain(text: &str) -> String {
+    let text = text.trim();
     let mut safe = String::with_capacity(text.len());
-    for c in text.chars() {
+    let mut before = None;
+    let mut rest = text.chars().peekable();
+    // A number at the start of a line would open a list.
+    let mut opening = true;
+    while let Some(c) = rest.next() {
+        let in_word = |c: Option<char>| c.is_some_and(char::is_alphanumeric);
         match c {
             '\n' | '\r' | '\t' => safe.push(' '),
             '<' => safe.push_str("&lt;"),
             '>' => safe.push_str("&gt;"),
             '&' => safe.push_str("&amp;"),
-            // A word with underscores inside is no emphasis on any forge, and reads better bare.
             '\\' | '`' | '*' | '[' | ']' | '|' | '~' | '$' | '#' | '!' | '@' => {
                 safe.push('\\');
                 safe.push(c);
             }
-            _ if c.is_control() || is_turning(c) => safe.push('\u{fffd}'),
+            // Within a word it is no emphasis on any forge, and reads better bare.
+            '_' if !(in_word(before) && in_word(rest.peek().copied())) => safe.push_str("\\_"),
+            '-' | '+' | '=' if before.is_none() => {
+                safe.push('\\');
+                safe.push(c);
+            }
+            '.' | ')' if opening && before.is_some() => {
+                safe.push('\\');
+                safe.push(c);
+            }
+            _ if is_harmful(c) => safe.push('\u{fffd}'),
             _ => safe.push(c),
         }
+        opening = opening && c.is_ascii_digit();
+        before = Some(c);
     }
     safe
 }
 
-/// Text of a source as code within a cell.
+/// Text of a source as code within a cell; as plain text where forges differ about what ends a code
+/// or a cell.
 pub fn code(text: &str) -> String {
-    let harmless = |c: char| match c {
-        '`' => '\'',
-        _ if c.is_control() || is_turning(c) => ' ',
-        _ => c,
-    };
-    let text: String = text.chars().map(harmless).collect();
-    // A pipe ends a cell even within code, unless it is escaped.
-    format!("`{}`", text.trim().replace('|', "\\|"))
-}
-
-/// Marks that turn the direction of writing, or join what looks apart.
-fn is_turning(c: char) -> bool {
-    matches!(c, '\u{61c}' | '\u{200b}'..='\u{200f}' | '\u{2028}'..='\u{202e}' | '\u{2060}'..='\u{206f}' | '\u{feff}')
+    let text = text.trim();
+    if text.is_empty() || text.contains(['`', '|', '\\']) {
+        return plain(text);
+    }
+    let text: String = text.chars().map(|c| if is_harmful(c) { ' ' } else { c }).collect();
+    format!("`{text}`")
 }

@@ -2,6 +2,8 @@
 
 use std::fmt::Write;
 
+use crate::report::inert::is_harmful;
+
 /// What something is painted as: its light colour, and its dark one.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
 pub enum Paint {
@@ -179,11 +181,7 @@ fn escape(text: &str) -> String {
             '<' => safe.push_str("&lt;"),
             '>' => safe.push_str("&gt;"),
             '"' => safe.push_str("&quot;"),
-            _ if c.is_control()
-                || matches!(c, '\u{202a}'..='\u{202e}' | '\u{2066}'..='\u{2069}' | '\u{fffe}' | '\u{ffff}') =>
-            {
-                safe.push('\u{fffd}');
-            }
+            _ if is_harmful(c) || matches!(c, '\u{fffe}' | '\u{ffff}') => safe.push('\u{fffd}'),
             _ => safe.push(c),
         }
     }
