@@ -128,12 +128,13 @@ fn draw_panel(svg: &mut Svg, flight: &Flight, show: &Show, panel: &Panel, time: 
         let at = (time.place(peak.state.time), scale.place(peak.value / factor));
         svg.dot(at, Paint::Third);
         let anchor = if at.0 > 0.8 * WIDTH { Anchor::End } else { Anchor::Start };
-        let x = if anchor == Anchor::End { at.0 - 9.0 } else { at.0 + 9.0 };
+        // To the left the line climbs to its peak, so the text stands above it there.
+        let (x, y) = if anchor == Anchor::End { (at.0 - 6.0, at.1 - 7.0) } else { (at.0 + 9.0, at.1 + 4.0) };
         let text = format!(
             "{} {unit} at {} s",
             show.number(peak.value, unit, 4),
             crate::quantity::format_fixed(peak.state.time, 1)
         );
-        svg.text((x, at.1 + 4.0), anchor, Paint::Third, 12, text.trim());
+        svg.text((x, y), anchor, Paint::Third, 12, text.trim());
     }
 }

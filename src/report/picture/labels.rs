@@ -2,7 +2,7 @@
 
 /// Room that one character of small text takes at the most, and one line.
 const CHARACTER: f64 = 6.6;
-const LINE: f64 = 13.0;
+const LINE: f64 = 12.0;
 
 /// Places already taken.
 #[derive(Default)]

@@ -13,6 +13,8 @@ const RIGHT: f64 = 96.0;
 const TOP: f64 = 64.0;
 const BAR: f64 = 26.0;
 const GAP: f64 = 12.0;
+/// Half a unit of the last digit shown: less is neither gain nor loss.
+const SHOWN: f64 = 0.05;
 
 pub fn draw(mission: &Mission, flight: &Flight, show: &Show) -> String {
     let total = &flight.ledger.total;
@@ -28,7 +30,7 @@ pub fn draw(mission: &Mission, flight: &Flight, show: &Show) -> String {
     let mut bars = vec![("paid by propellant", 0.0, total.paid, total.paid, Paint::First)];
     let mut rest = total.paid;
     for (name, loss) in losses {
-        let paint = if loss >= 0.0 { Paint::Second } else { Paint::Third };
+        let paint = if loss / factor >= -SHOWN { Paint::Second } else { Paint::Third };
         bars.push((name, rest, rest - loss, -loss, paint));
         rest -= loss;
     }
@@ -65,8 +67,11 @@ pub fn draw(mission: &Mission, flight: &Flight, show: &Show) -> String {
         svg.rect((a.min(b), y), ((a - b).abs().max(1.5), BAR), *paint);
         svg.text((LEFT - 10.0, y + 17.0), Anchor::End, Paint::Ink, 12, name);
         let text = crate::quantity::format_fixed(change / factor, 1);
-        let text =
-            if *change > 0.0 && index > 0 && index + 1 < bars.len() { format!("+{text}") } else { text };
+        let text = if *change / factor > SHOWN && index > 0 && index + 1 < bars.len() {
+            format!("+{text}")
+        } else {
+            text
+        };
         svg.text((a.max(b) + 8.0, y + 17.0), Anchor::Start, Paint::Ink, 12, &text);
         if index + 1 < bars.len() {
             svg.line((b, y + BAR), (b, y + BAR + GAP), Paint::Faint, 1.0);
