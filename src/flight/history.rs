@@ -8,7 +8,8 @@ use crate::math::Scalar;
 
 /// All steps in order of time.
 pub struct History<'p, S> {
-    segments: Vec<Motion<'p, S>>,
+    /// With whether nothing jumps at its start.
+    segments: Vec<(Motion<'p, S>, bool)>,
     legs: Vec<Leg<S>>,
 }
 
@@ -25,12 +26,17 @@ impl<'p, S: Scalar> History<'p, S> {
 
     /// Begins a segment; the steps that follow belong to it.
     pub fn begin(&mut self, motion: &Motion<'p, S>) {
-        self.segments.push(motion.clone());
+        self.segments.push((motion.clone(), false));
+    }
+
+    /// Goes on with the segment under another formula of the air or of the drag curve.
+    pub fn join(&mut self, motion: &Motion<'p, S>) {
+        self.segments.push((motion.clone(), true));
     }
 
     /// The segment that was begun last, as it began.
     pub fn segment(&self) -> Option<&Motion<'p, S>> {
-        self.segments.last()
+        self.segments.iter().rfind(|(_, joined)| !joined).map(|(motion, _)| motion)
     }
 
     pub fn push(&mut self, dense: Dense<S>) {
@@ -44,7 +50,7 @@ impl<'p, S: Scalar> History<'p, S> {
 
     fn motion(&self, leg: &Leg<S>) -> &Motion<'p, S> {
         // invariant: a leg is pushed after the segment that it belongs to.
-        &self.segments[leg.segment]
+        &self.segments[leg.segment].0
     }
 
     /// The phase that a step belongs to.
@@ -64,9 +70,9 @@ impl<'p, S: Scalar> History<'p, S> {
         self.look(leg, time, |look| look.snapshot())
     }
 
-    /// Whether two steps that follow each other belong to one segment, so that nothing jumps between.
+    /// Whether nothing jumps between two steps that follow each other.
     pub fn joined(&self, before: &Leg<S>, after: &Leg<S>) -> bool {
-        before.segment == after.segment
+        before.segment == after.segment || self.segments.get(after.segment).is_some_and(|(_, joined)| *joined)
     }
 }
 

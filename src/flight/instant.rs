@@ -55,7 +55,7 @@ impl<S: Scalar> Instant<S> {
         let airspeed = if square.real() > 0.0 { square.sqrt() } else { S::zero() };
         let axis = attitude::axis(motion, time, velocity, over_ground, &local);
 
-        let air = plan.air.at(local.altitude);
+        let air = plan.air.within(motion.layer, local.altitude);
         let (mut mach, mut dynamic_pressure, mut pressure) = (S::zero(), S::zero(), S::zero());
         let mut aerodynamic = Vector::zero();
         if let Some(air) = &air {
@@ -71,7 +71,7 @@ impl<S: Scalar> Instant<S> {
                         Second::Altitude => local.altitude,
                         Second::AngleOfAttack => attitude::angle(axis, over_ground),
                     };
-                    table.at(mach, second) * *area
+                    table.within(motion.piece, mach, second) * *area
                 }
             };
             aerodynamic = over_ground * -(air.density * airspeed * area * 0.5);

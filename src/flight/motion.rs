@@ -3,7 +3,7 @@
 use super::Frame;
 use super::instant::Instant;
 use super::integrate::Field;
-use super::plan::{Plan, Thrust};
+use super::plan::{Drag, Plan, Thrust};
 use super::throttle::Throttle;
 use crate::math::{Scalar, Vector};
 
@@ -42,6 +42,9 @@ pub struct Motion<'p, S> {
     pub throttle: Throttle,
     /// Which parts are still attached.
     pub carried: Vec<bool>,
+    /// The layer of the air and the piece of the drag curve whose formulas hold; events change them.
+    pub layer: usize,
+    pub piece: usize,
     /// Propellant burnt by each part up to the start of the segment, kg.
     pub burnt: Vec<S>,
     /// Columns of the ledger up to the start of the segment, m/s.
@@ -61,6 +64,11 @@ impl<'p, S: Scalar> Motion<'p, S> {
             attached: S::zero(),
             axis: plan.start.axes.up,
             throttle: Throttle::Commanded,
+            layer: plan.air.layer(plan.start.altitude.real()),
+            piece: match &plan.drag {
+                Drag::Curve { table, .. } => table.piece(start_mach(plan)),
+                _ => 0,
+            },
             carried: vec![true; plan.parts.len()],
             burnt: vec![S::zero(); plan.parts.len()],
             columns: [S::zero(); COLUMNS],
@@ -106,6 +114,14 @@ impl<'p, S: Scalar> Motion<'p, S> {
         let Some(motor) = &self.plan.parts[lit.part].motor else { return S::zero() };
         self.vacuum_thrust(lit, time) * clamp(common, motor.least, motor.most) / motor.exhaust
     }
+}
+
+/// Mach number at the start; zero without air.
+fn start_mach<S: Scalar>(plan: &Plan<S>) -> f64 {
+    let start = &plan.start;
+    let over_ground = start.velocity - plan.spin.velocity(start.position);
+    let speed = over_ground.dot(over_ground).real().sqrt();
+    plan.air.at(start.altitude).map_or(0.0, |air| speed / air.sound_speed.real())
 }
 
 /// What engines give together.

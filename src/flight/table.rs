@@ -47,15 +47,31 @@ impl<S: Scalar> Table<S> {
         self.beyond == Beyond::Refuse
     }
 
-    /// The value at one or two inputs; the second is not looked at where there is one input. A curve
-    /// that refuses to be read outside its range gives its end value there: the flight watches the
-    /// inputs and stops.
+    /// Which piece an input lies in: the number of knots not above it, so that zero and the number of
+    /// all knots lie outside.
+    pub fn piece(&self, first: f64) -> usize {
+        piece(&self.first, first)
+    }
+
+    /// The value at one or two inputs; the second is not looked at where there is one input.
     pub fn at(&self, first: S, second: S) -> S {
+        self.within(self.piece(first.real()), first, second)
+    }
+
+    /// The same by the formula of one piece, which goes on smoothly beyond its ends: so an integration
+    /// sees no kink before it has cut its step there. A curve that refuses to be read outside its
+    /// range gives its end value there: the flight watches the input and stops.
+    pub fn within(&self, piece: usize, first: S, second: S) -> S {
         if self.second.is_empty() {
-            return self.rows.first().map_or_else(S::zero, |row| row.at(&self.first, first, self.beyond));
+            return self
+                .rows
+                .first()
+                .map_or_else(S::zero, |row| row.at(&self.first, piece, first, self.beyond));
         }
-        let values = self.rows.iter().map(|row| row.at(&self.second, second, self.beyond)).collect();
-        Row::new(&self.first, values, self.smooth).at(&self.first, first, self.beyond)
+        let of_second = self::piece(&self.second, second.real());
+        let values =
+            self.rows.iter().map(|row| row.at(&self.second, of_second, second, self.beyond)).collect();
+        Row::new(&self.first, values, self.smooth).at(&self.first, piece, first, self.beyond)
     }
 }
 
@@ -65,22 +81,22 @@ impl<S: Scalar> Row<S> {
         Row { values, slopes }
     }
 
-    fn at(&self, points: &[f64], input: S, beyond: Beyond) -> S {
-        let x = input.real();
-        let (Some(low), Some(high)) = (points.first(), points.last()) else { return S::zero() };
-        let last = points.len() - 1;
+    fn at(&self, points: &[f64], piece: usize, input: S, beyond: Beyond) -> S {
+        let Some(last) = points.len().checked_sub(1) else { return S::zero() };
         if last == 0 {
             return self.values[0];
         }
-        if x < *low || x > *high {
-            let end = if x < *low { 0 } else { last };
+        // The last knot itself still belongs to the curve.
+        let outside = piece == 0 || piece > last && input.real() > points[last];
+        if outside {
+            let end = if piece == 0 { 0 } else { last };
             return match beyond {
                 Beyond::Hold | Beyond::Refuse => self.values[end],
                 Beyond::Zero => S::zero(),
                 Beyond::Extend => self.values[end] + (input - points[end]) * self.end_slope(points, end),
             };
         }
-        let left = points.partition_point(|point| *point <= x).clamp(1, last) - 1;
+        let left = piece.clamp(1, last) - 1;
         let width = points[left + 1] - points[left];
         let (a, b) = (self.values[left], self.values[left + 1]);
         let s = (input - points[left]) / width;
@@ -98,9 +114,13 @@ impl<S: Scalar> Row<S> {
         if let Some(slope) = self.slopes.get(end) {
             return *slope;
         }
-        let left = end.saturating_sub(1);
+        let left = end.saturating_sub(1).min(self.values.len().saturating_sub(2));
         (self.values[left + 1] - self.values[left]) / (points[left + 1] - points[left])
     }
+}
+
+fn piece(points: &[f64], input: f64) -> usize {
+    points.partition_point(|point| *point <= input)
 }
 
 /// Slopes of the monotone cubic: the weighted harmonic mean of the neighbouring secants, zero at an

@@ -1,6 +1,6 @@
 //! What is watched during a segment, and where in a step it comes about.
 
-use super::integrate::{Dense, crossings, root};
+use super::integrate::{Dense, root};
 use super::motion::Motion;
 use super::plan::{Condition, Drag};
 use super::quantities::Look;
@@ -8,8 +8,8 @@ use super::throttle::{Throttle, excess, excess_at, least, needed};
 use crate::math::Scalar;
 use crate::model::Comparison;
 
-/// Something that ends a step where it comes about. The order is that of one instant: sheds first,
-/// then what burns out, then the end of the phase, then what only switches.
+/// Something that ends a step where it comes about. The order of a list is that of one instant:
+/// sheds first, then what burns out, then the end of the phase, then what only switches.
 #[derive(Clone, Copy, Debug, PartialEq)]
 pub enum Watch {
     /// Index of the phase's shed.
@@ -20,16 +20,11 @@ pub enum Watch {
     Until(usize),
     /// The hold goes over to this.
     Throttle(Throttle),
-    /// A layer of the air, m.
-    Layer(f64),
-    /// A knot of the drag curve, Mach number.
-    Knot(f64),
-    /// The Mach number leaves the range of a curve that refuses it, below or above.
-    Range {
-        above: bool,
-        limit: f64,
-    },
     Ground,
+    /// The air goes over to this layer, across an altitude in m.
+    Layer(usize, f64),
+    /// The drag curve goes over to this piece, across a Mach number.
+    Piece(usize, f64),
 }
 
 /// What may come about in a segment.
@@ -39,36 +34,16 @@ pub struct Watches<S> {
     pub burnable: Vec<S>,
     /// Altitude of the ground, m.
     pub ground: f64,
-    /// Altitudes of the air's layers and Mach numbers of the drag curve's knots, rising.
-    layers: &'static [f64],
-    knots: Vec<f64>,
 }
 
-/// A root this close to the start of a step is that of the event that ended the step before, s.
-const SAME_INSTANT: f64 = 1e-7;
+/// Where within a step the list is looked at, as shares of the step, beside its ends: enough to see
+/// two crossings of one step apart.
+const LOOKS: [f64; 3] = [0.25, 0.5, 0.75];
 
 impl<S: Scalar> Watches<S> {
     pub fn new(motion: &Motion<S>, burnable: Vec<S>, list: Vec<Watch>) -> Self {
         let start = &motion.plan.start;
-        let knots = match &motion.plan.drag {
-            Drag::Curve { table, .. } => table.knots().to_vec(),
-            _ => Vec::new(),
-        };
-        let mut watches = Watches {
-            list,
-            burnable,
-            ground: if start.pad { start.altitude.real() } else { 0.0 },
-            layers: motion.plan.air.layer_altitudes(),
-            knots,
-        };
-        if let (Drag::Curve { table, .. }, Some(low), Some(high)) =
-            (&motion.plan.drag, watches.knots.first().copied(), watches.knots.last().copied())
-            && table.refuses()
-        {
-            watches.list.push(Watch::Range { above: false, limit: low });
-            watches.list.push(Watch::Range { above: true, limit: high });
-        }
-        watches
+        Watches { list, burnable, ground: if start.pad { start.altitude.real() } else { 0.0 } }
     }
 
     /// The value that crosses zero where the watch comes about, from below.
@@ -101,11 +76,11 @@ impl<S: Scalar> Watches<S> {
                     (Throttle::Floor, _) => -excess_at(motion, hold, now, least(motion)).real(),
                 }
             }),
-            Watch::Layer(altitude) => now.local.altitude.real() - altitude,
-            Watch::Knot(mach) => now.mach.real() - mach,
-            Watch::Range { above: true, limit } => now.mach.real() - limit,
-            Watch::Range { above: false, limit } => limit - now.mach.real(),
             Watch::Ground => self.ground - now.local.altitude.real(),
+            Watch::Layer(layer, altitude) => {
+                rising(layer > motion.layer, now.local.altitude.real() - altitude)
+            }
+            Watch::Piece(piece, mach) => rising(piece > motion.piece, now.mach.real() - mach),
         }
     }
 
@@ -127,38 +102,27 @@ impl<S: Scalar> Watches<S> {
         }
     }
 
-    /// The range of the drag curve's Mach numbers.
-    pub fn range(&self) -> (f64, f64) {
-        (self.knots.first().copied().unwrap_or(0.0), self.knots.last().copied().unwrap_or(0.0))
-    }
-
     /// The values of the whole list at an instant.
     pub fn values(&self, look: &Look<S>) -> Vec<f64> {
         self.list.iter().map(|watch| self.value(*watch, look)).collect()
     }
 
-    /// Layers and knots on either side of the instant.
-    fn neighbours(&self, look: &Look<S>) -> (usize, usize) {
-        let (altitude, mach) = (look.now.local.altitude.real(), look.now.mach.real());
-        let layer = self.layers.partition_point(|layer| *layer <= altitude);
-        (layer, self.knots.partition_point(|knot| *knot <= mach))
-    }
-
-    /// The earliest of all that comes about within a step, with its time. `before` are the values of
-    /// the list at the step's start, `after` at its end, which ties to source order at equal times.
+    /// The earliest of all that comes about within a step, with its time; of two at one time the one
+    /// that stands first. `before` and `after` are the values of the list at the step's ends, `last`
+    /// looks at its end.
     pub fn earliest(
         &self,
-        motion: &Motion<S>,
         dense: &Dense<S>,
         before: &[f64],
-        first: &Look<S>,
+        after: &[f64],
         last: &Look<S>,
     ) -> Option<(f64, Watch)> {
         let (start, end) = (dense.start(), dense.end());
+        let motion = last.motion;
         let mut state = vec![S::zero(); motion.dimension()];
-        let mut at = |watch: Watch, time: f64| {
+        let mut look = |time: f64, see: &mut dyn FnMut(&Look<S>)| {
             dense.state(S::from(time), &mut state);
-            self.value(watch, &Look::new(motion, S::from(time), &state))
+            see(&Look::new(motion, S::from(time), &state));
         };
         let mut found: Option<(f64, Watch)> = None;
         let mut offer = |time: f64, watch: Watch| {
@@ -166,39 +130,70 @@ impl<S: Scalar> Watches<S> {
                 found = Some((time, watch));
             }
         };
-        for (watch, value) in self.list.iter().zip(before) {
-            let at_end = self.value(*watch, last);
-            // Flight quantities move slowly within a step: what is far from its threshold at both
-            // ends, and no nearer at the end, is not looked at between.
-            let quiet = at_end < *value && *value < 0.0 && !matches!(watch, Watch::Throttle(_));
-            if quiet || *value >= 0.0 && at_end >= 0.0 {
-                continue;
-            }
-            let bracket =
-                match *value < 0.0 && at_end >= 0.0 {
-                    true => Some((start, end)),
-                    false => crossings(start, end, *value, true, |time| {
-                        if time == end { at_end } else { at(*watch, time) }
-                    }),
-                };
-            if let Some((low, high)) = bracket {
-                offer(root(low, high, |time| at(*watch, time)), *watch);
+        let mut within: Vec<(f64, Vec<f64>)> = Vec::new();
+        if (0..self.list.len()).any(|index| self.may_turn(index, before, after)) {
+            for share in LOOKS {
+                let time = start + (end - start) * share;
+                look(time, &mut |look| within.push((time, self.values(look))));
             }
         }
-        let ((layer_before, knot_before), (layer_after, knot_after)) =
-            (self.neighbours(first), self.neighbours(last));
-        let mut cut = |before: usize, after: usize, points: &[f64], make: fn(f64) -> Watch| {
-            // The first point on the way; a later one is met by a later step.
-            let point = if after > before { points.get(before) } else { points.get(before.wrapping_sub(1)) };
-            if let (true, Some(point)) = (after != before, point) {
-                let time = root(start, end, |time| at(make(*point), time));
-                if time > start + SAME_INSTANT && time < end {
-                    offer(time, make(*point));
+        for (index, watch) in self.list.iter().enumerate() {
+            let (mut low, mut at_low) = (start, before[index]);
+            let inner = within.iter().map(|(time, values)| (*time, values[index]));
+            for (high, at_high) in inner.chain([(end, after[index])]) {
+                if at_low < 0.0 && at_high >= 0.0 {
+                    let time = root(low, high, |time| {
+                        let mut value = 0.0;
+                        look(time, &mut |look| value = self.value(*watch, look));
+                        value
+                    });
+                    offer(time, *watch);
+                    break;
                 }
+                (low, at_low) = (high, at_high);
             }
-        };
-        cut(layer_before, layer_after, self.layers, Watch::Layer);
-        cut(knot_before, knot_after, &self.knots, Watch::Knot);
+        }
+        for watch in [layer_left(last), piece_left(last)].into_iter().flatten() {
+            let time = root(start, end, |time| {
+                let mut value = 0.0;
+                look(time, &mut |look| value = self.value(watch, look));
+                value
+            });
+            offer(time, watch);
+        }
         found
     }
+
+    /// Whether a watch that is quiet at both ends of a step may have come about between: it is nearer
+    /// at the end than at the start. Propellant only gets less, so its watch never turns.
+    fn may_turn(&self, index: usize, before: &[f64], after: &[f64]) -> bool {
+        let (before, after) = (before[index], after[index]);
+        !matches!(self.list[index], Watch::Spent(_)) && before < 0.0 && after < 0.0 && after > before
+            || before >= 0.0 && after < 0.0
+    }
+}
+
+fn rising(up: bool, value: f64) -> f64 {
+    if up { value } else { -value }
+}
+
+/// The next layer of the air, if the altitude has left the one that holds.
+fn layer_left<S: Scalar>(look: &Look<S>) -> Option<Watch> {
+    let layers = look.motion.plan.air.layer_altitudes();
+    left(look.motion.layer, layers, look.now.local.altitude.real()).map(|(layer, at)| Watch::Layer(layer, at))
+}
+
+/// The next piece of the drag curve, if the Mach number has left the one that holds.
+fn piece_left<S: Scalar>(look: &Look<S>) -> Option<Watch> {
+    let Drag::Curve { table, .. } = &look.motion.plan.drag else { return None };
+    // Without air there is no Mach number to speak of.
+    look.now.air?;
+    left(look.motion.piece, table.knots(), look.now.mach.real()).map(|(piece, at)| Watch::Piece(piece, at))
+}
+
+/// The neighbour into which a value has gone from a piece between points, and the point between.
+fn left(piece: usize, points: &[f64], value: f64) -> Option<(usize, f64)> {
+    let above = points.get(piece).filter(|point| value >= **point).map(|point| (piece + 1, *point));
+    let below = piece.checked_sub(1).and_then(|below| Some((below, *points.get(below)?)));
+    above.or(below.filter(|(_, point)| value < *point))
 }

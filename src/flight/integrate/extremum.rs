@@ -1,10 +1,10 @@
 //! The greatest value of a function over an interval.
 
 /// Intervals that are looked at before the best of them is searched closely.
-const LOOKS: usize = 12;
+const LOOKS: usize = 6;
 /// Sections of the interval between two looks: down to half the digits of a number. A count and not
 /// a width, because the width of a very short interval is lost in the digits of its ends.
-const SECTIONS: usize = 40;
+const SECTIONS: usize = 26;
 /// Golden section: the ratio of the lesser part to the whole.
 const GOLDEN: f64 = 0.381_966_011_250_105_1;
 

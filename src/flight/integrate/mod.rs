@@ -10,5 +10,5 @@ mod tests;
 
 pub use dense::Dense;
 pub use extremum::maximum;
-pub use root::{crossings, root};
+pub use root::root;
 pub use stepper::{Field, StepFailure, Stepper, Tolerance};

@@ -1,9 +1,5 @@
 //! Roots of a function of one variable.
 
-/// Points within a step at which an event function is looked at, beside the step's ends: enough to
-/// see two crossings of one step apart.
-const LOOKS: usize = 8;
-
 /// The root of a continuous function between `a` and `b`, where its values have different signs, to
 /// the resolution of the numbers.
 ///
@@ -47,27 +43,4 @@ pub fn root(mut a: f64, mut b: f64, mut f: impl FnMut(f64) -> f64) -> f64 {
         radius *= 0.5;
     }
     if at_a.abs() < at_b.abs() { a } else { b }
-}
-
-/// The first interval of `[start, end]` in which `f` goes from not positive to positive (`rising`)
-/// or from not negative to negative, looked for at the ends and at points between. `None` where there
-/// is none. The value at `start` is given by the caller, who may know its sign better.
-pub fn crossings(
-    start: f64,
-    end: f64,
-    at_start: f64,
-    rising: bool,
-    mut f: impl FnMut(f64) -> f64,
-) -> Option<(f64, f64)> {
-    let sign = if rising { 1.0 } else { -1.0 };
-    let (mut before, mut at_before) = (start, sign * at_start);
-    for look in 1..=LOOKS + 1 {
-        let here = if look > LOOKS { end } else { start + (end - start) * look as f64 / (LOOKS + 1) as f64 };
-        let at_here = sign * f(here);
-        if at_before < 0.0 && at_here >= 0.0 {
-            return Some((before, here));
-        }
-        (before, at_before) = (here, at_here);
-    }
-    None
 }

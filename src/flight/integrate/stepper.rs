@@ -241,10 +241,6 @@ impl<S: Scalar> Stepper<S> {
         self.t1
     }
 
-    pub fn start_state(&self) -> &[S] {
-        &self.y0
-    }
-
     pub fn end_state(&self) -> &[S] {
         &self.y1
     }

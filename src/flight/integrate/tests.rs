@@ -1,4 +1,4 @@
-use super::{Field, Stepper, Tolerance, crossings, maximum, root};
+use super::{Field, Stepper, Tolerance, maximum, root};
 
 struct System<F>(F);
 
@@ -122,14 +122,6 @@ fn roots_are_found_to_the_last_digits() {
     let fixed = root(0.0, 1.0, |x| x - libm::cos(x));
     assert!((fixed - 0.739_085_133_215_160_6).abs() < 1e-15);
     assert_eq!(root(1.0, 2.0, |x| x - 1.0), 1.0);
-}
-
-#[test]
-fn a_double_crossing_within_a_step_is_seen() {
-    let f = |t: f64| (t - 0.4) * (0.6 - t);
-    let (low, high) = crossings(0.0, 1.0, f(0.0), true, f).unwrap();
-    assert!(low < 0.4 && (0.4..0.6).contains(&high));
-    assert!(crossings(0.0, 1.0, -1.0, true, |_| -1.0).is_none());
 }
 
 /// An interval of a few units in the last place ends the search like any other.

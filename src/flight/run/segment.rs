@@ -2,7 +2,8 @@
 
 use super::{After, Flown, Run};
 use crate::flight::integrate::{StepFailure, Stepper, Tolerance};
-use crate::flight::motion::COLUMNS;
+use crate::flight::motion::{COLUMNS, Motion};
+use crate::flight::plan::Drag;
 use crate::flight::quantities::Look;
 use crate::flight::result::{Cause, Failure};
 use crate::flight::throttle::{Throttle, excess};
@@ -16,7 +17,7 @@ const MOST_STEPS: u64 = 120_000;
 /// So far below the ground nothing flies, m.
 const SUNK: f64 = 1.0;
 
-impl<S: Scalar> Run<'_, '_, S> {
+impl<'p, S: Scalar> Run<'p, '_, S> {
     /// Flies until something switches or the phase ends.
     pub(super) fn segment(&mut self) -> Flown<After> {
         self.light();
@@ -31,7 +32,7 @@ impl<S: Scalar> Run<'_, '_, S> {
         let state = self.state();
         let mut stepper = Stepper::new(tolerance(self.settings.tolerance, self.motion.lit.len()));
         stepper.start(&mut motion, self.time, &state, self.size);
-        let mut values = watches.values(&Look::new(&motion, self.time, &state));
+        let mut before = watches.values(&Look::new(&motion, self.time, &state));
         let limit = stops.pop().unwrap_or(self.time);
         while self.time.real() < limit.real() {
             if self.book.steps + stepper.steps() > MOST_STEPS {
@@ -44,24 +45,29 @@ impl<S: Scalar> Run<'_, '_, S> {
                 return Err(self.broken(failure, &stepper));
             }
             let mut dense = stepper.dense(&mut motion);
-            let found = {
-                let first = Look::new(&motion, stepper.start_time(), stepper.start_state());
-                let last = Look::new(&motion, stepper.end_time(), stepper.end_state());
-                watches.earliest(&motion, &dense, &values, &first, &last)
-            };
+            let last = Look::new(&motion, stepper.end_time(), stepper.end_state());
+            let mut after = watches.values(&last);
+            let found = watches.earliest(&dense, &before, &after, &last);
             if let Some((time, _)) = found.filter(|(time, _)| *time < stepper.end_time().real()) {
                 stepper.redo(&mut motion, S::from(time.max(stepper.start_time().real())));
                 dense = stepper.dense(&mut motion);
+                after = watches.values(&Look::new(&motion, stepper.end_time(), stepper.end_state()));
             }
             self.book.history.push(dense);
             self.follow(&stepper);
-            let end = Look::new(&motion, stepper.end_time(), stepper.end_state());
-            values = watches.values(&end);
-            self.notice(&end);
-            let sunk = end.now.local.altitude.real() < watches.ground - SUNK
-                && watches.list.contains(&Watch::Ground);
+            self.notice(&Look::new(&motion, stepper.end_time(), stepper.end_state()));
+            before = after;
+            let sunk = self.below(&watches) > SUNK;
             match found {
-                Some((_, Watch::Layer(_) | Watch::Knot(_))) | None if !sunk => {}
+                None if !sunk => {}
+                Some((_, Watch::Layer(layer, _))) if !sunk => {
+                    motion.layer = layer;
+                    self.go_on(&motion, layer, motion.piece);
+                }
+                Some((_, Watch::Piece(piece, _))) if !sunk && !outside(&motion, piece) => {
+                    motion.piece = piece;
+                    self.go_on(&motion, motion.layer, piece);
+                }
                 _ => {
                     self.settle(&stepper);
                     let watch = found.map_or(Watch::Ground, |(_, watch)| watch);
@@ -74,6 +80,19 @@ impl<S: Scalar> Run<'_, '_, S> {
             true => Err(self.failure(Cause::NeverEnds { after: LONGEST_PHASE })),
             false => Ok(After::Switch),
         }
+    }
+
+    /// Another formula of the air or of the drag curve holds from here on; the values join, so that
+    /// the integration goes on.
+    fn go_on(&mut self, motion: &Motion<'p, S>, layer: usize, piece: usize) {
+        (self.motion.layer, self.motion.piece) = (layer, piece);
+        self.book.history.join(motion);
+    }
+
+    /// How far the vehicle is below ground that nothing but a touch-down may reach, m.
+    fn below(&self, watches: &Watches<S>) -> f64 {
+        let altitude = self.plan.surface.local(self.position).altitude.real();
+        if watches.list.contains(&Watch::Ground) { watches.ground - altitude } else { 0.0 }
     }
 
     /// Takes over the state at the end of the last step.
@@ -100,11 +119,6 @@ impl<S: Scalar> Run<'_, '_, S> {
     /// What follows from a watch that came about now.
     fn comes_about(&mut self, watch: Watch, watches: &Watches<S>) -> Flown<After> {
         match watch {
-            Watch::Range { .. } => {
-                let (low, high) = watches.range();
-                let input = self.look(|look| look.now.mach.real());
-                Err(self.failure(Cause::CurveRange { input, low, high }))
-            }
             Watch::Ground => {
                 let speed = self.look(|look| look.now.airspeed.real());
                 Err(self.failure(Cause::GroundImpact { speed }))
@@ -130,7 +144,17 @@ impl<S: Scalar> Run<'_, '_, S> {
                 self.shed_now();
                 Ok(After::Ends(condition))
             }
-            Watch::Layer(_) | Watch::Knot(_) => Ok(After::Switch),
+            Watch::Layer(..) => Ok(After::Switch),
+            Watch::Piece(..) => {
+                let knots = drag_knots(&self.motion);
+                let (low, high) = (knots.first().copied(), knots.last().copied());
+                let input = self.look(|look| look.now.mach.real());
+                Err(self.failure(Cause::CurveRange {
+                    input,
+                    low: low.unwrap_or(0.0),
+                    high: high.unwrap_or(0.0),
+                }))
+            }
         }
     }
 
@@ -159,9 +183,27 @@ impl<S: Scalar> Run<'_, '_, S> {
     }
 }
 
-/// Absolute errors that count as nothing: a micrometre, a nanometre a second and a milligram for a
+/// Mach numbers of the drag curve's knots.
+fn drag_knots<'m, S: Scalar>(motion: &'m Motion<S>) -> &'m [f64] {
+    match &motion.plan.drag {
+        Drag::Curve { table, .. } => table.knots(),
+        _ => &[],
+    }
+}
+
+/// Whether a piece of the drag curve lies outside a range that it refuses to leave.
+fn outside<S: Scalar>(motion: &Motion<S>, piece: usize) -> bool {
+    match &motion.plan.drag {
+        Drag::Curve { table, .. } => table.refuses() && (piece == 0 || piece >= table.knots().len()),
+        _ => false,
+    }
+}
+
+/// The integration's own tolerance is a third of what is promised, because errors of several steps
+/// and of located events add up. Absolute errors that count as nothing: a micrometre, a nanometre a second and a milligram for a
 /// relative tolerance of 1e-9, and in proportion.
 fn tolerance(relative: f64, lit: usize) -> Tolerance {
+    let relative = 0.3 * relative;
     let mut absolute = vec![1e3 * relative; 3];
     absolute.extend([relative; 3]);
     absolute.extend(vec![1e3 * relative; lit]);

@@ -51,6 +51,21 @@ impl<S: Scalar> Air<S> {
         }
     }
 
+    /// Which layer an altitude in m lies in: the number of [`Air::layer_altitudes`] not above it.
+    pub fn layer(&self, altitude: f64) -> usize {
+        self.layer_altitudes().partition_point(|layer| *layer <= altitude)
+    }
+
+    /// The air at an altitude in m by the formula of one layer, which goes on smoothly beyond the
+    /// layer's ends: so an integration sees no kink before it has cut its step there.
+    #[inline]
+    pub fn within(&self, layer: usize, altitude: S) -> Option<AirState<S>> {
+        match self {
+            Air::Standard1976 => standard_1976::within(layer, altitude),
+            Air::None | Air::Exponential(_) => self.at(altitude),
+        }
+    }
+
     /// Geodetic altitudes in m, ascending, where a formula gives way to another. Some derivative of
     /// the air jumps there, so a step of the integration ends there.
     pub fn layer_altitudes(&self) -> &'static [f64] {

@@ -79,7 +79,18 @@ pub(super) fn sound_speed<S: Scalar>(temperature: S) -> S {
 #[inline]
 pub(super) fn at<S: Scalar>(altitude: S) -> AirState<S> {
     let height = geopotential(altitude);
-    let layer = layer_at(height.real());
+    of_layer(layer_at(height.real()), height)
+}
+
+/// The air at a geometric altitude in m by the formula of one layer, the lowest being 0, wherever
+/// the altitude is.
+#[inline]
+pub(super) fn within<S: Scalar>(layer: usize, altitude: S) -> AirState<S> {
+    let layer = layer.checked_sub(1).and_then(|above| HIGHER.iter().rev().nth(above)).unwrap_or(&GROUND);
+    of_layer(layer, geopotential(altitude))
+}
+
+fn of_layer<S: Scalar>(layer: &Layer, height: S) -> AirState<S> {
     let above = height - layer.base;
     let temperature = above * layer.lapse + layer.temperature;
     let ratio = if layer.lapse == 0.0 {

@@ -44,6 +44,16 @@ pub(super) fn at<S: Scalar>(altitude: S) -> Option<AirState<S>> {
     }
 }
 
+/// The air at a geodetic altitude in m by the formula of one layer, the lowest being 0.
+#[inline]
+pub(super) fn within<S: Scalar>(layer: usize, altitude: S) -> Option<AirState<S>> {
+    match LAYER_ALTITUDES.get(layer) {
+        Some(top) if *top <= JOINT => Some(lower::within(layer, altitude)),
+        Some(_) => upper::at(altitude),
+        None => None,
+    }
+}
+
 #[cfg(test)]
 mod lower_tests;
 #[cfg(test)]

@@ -20,7 +20,9 @@ pub(super) struct Segment {
 /// The air at a geometric altitude in m within the table.
 #[inline]
 pub(super) fn at<S: Scalar>(altitude: S) -> Option<AirState<S>> {
-    let segment = SEGMENTS.iter().rev().find(|segment| altitude.real() >= segment.bottom)?;
+    // Below the table its first cell goes on: a step may look there before it is cut at 86 km.
+    let segment =
+        SEGMENTS.iter().rev().find(|segment| altitude.real() >= segment.bottom).or(SEGMENTS.first())?;
     let steps = (altitude - segment.bottom) / segment.step;
     let cell = (steps.real() as usize).min(segment.rows.len().saturating_sub(2));
     let [low, high] = segment.rows.get(cell..cell + 2)? else { return None };
