@@ -61,9 +61,18 @@ impl<'p, S: Scalar> History<'p, S> {
     /// Looks at a time within a step.
     pub fn look<T>(&self, leg: &Leg<S>, time: f64, see: impl FnOnce(&Look<'_, 'p, S>) -> T) -> T {
         let motion = self.motion(leg);
-        let mut state = vec![S::zero(); motion.dimension()];
-        leg.dense.state(S::from(time), &mut state);
-        see(&Look::new(motion, S::from(time), &state))
+        // Looks are many: a state of the usual size needs no memory of its own.
+        let (mut usual, mut large) = ([S::zero(); 24], Vec::new());
+        let dimension = motion.dimension();
+        let state = match usual.get_mut(..dimension) {
+            Some(state) => state,
+            None => {
+                large.resize(dimension, S::zero());
+                &mut large[..]
+            }
+        };
+        leg.dense.state(S::from(time), state);
+        see(&Look::new(motion, S::from(time), state))
     }
 
     pub fn snapshot(&self, leg: &Leg<S>, time: f64) -> Snapshot {

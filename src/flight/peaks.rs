@@ -31,7 +31,9 @@ pub fn search<S: Scalar>(history: &History<S>, wanted: &[Wanted<S>]) -> Vec<Opti
     let mut best: Vec<Option<(f64, usize)>> = vec![None; wanted.len()];
     for (index, leg) in legs.iter().enumerate() {
         let phase = history.phase(leg);
-        for look in 0..=LOOKS {
+        // The end of the step before has been looked at.
+        let joined = index > 0 && history.joined(&legs[index - 1], leg);
+        for look in usize::from(joined)..=LOOKS {
             let time = within(leg, look as f64 / LOOKS as f64);
             history.look(leg, time, |look| {
                 for (wanted, best) in wanted.iter().zip(&mut best) {

@@ -36,6 +36,9 @@ pub struct Watches<S> {
     pub ground: f64,
 }
 
+/// The ground is met this far below where it stands, m: at a start from it, rounding is no contact.
+const TOUCH: f64 = 1e-6;
+
 /// Where within a step the list is looked at, as shares of the step, beside its ends: enough to see
 /// two crossings of one step apart.
 const LOOKS: [f64; 3] = [0.25, 0.5, 0.75];
@@ -76,12 +79,17 @@ impl<S: Scalar> Watches<S> {
                     (Throttle::Floor, _) => -excess_at(motion, hold, now, least(motion)).real(),
                 }
             }),
-            Watch::Ground => self.ground - now.local.altitude.real(),
+            Watch::Ground => self.depth(look),
             Watch::Layer(layer, altitude) => {
                 rising(layer > motion.layer, now.local.altitude.real() - altitude)
             }
             Watch::Piece(piece, mach) => rising(piece > motion.piece, now.mach.real() - mach),
         }
+    }
+
+    /// How far below the ground the vehicle is, m.
+    fn depth(&self, look: &Look<S>) -> f64 {
+        self.ground - look.now.local.altitude.real() - TOUCH
     }
 
     /// The value that is not negative where a condition is true.
@@ -98,7 +106,7 @@ impl<S: Scalar> Watches<S> {
             // Told by the part's own watch.
             Condition::Spent(_) => -1.0,
             Condition::Apex => -look.now.over_ground.dot(look.now.local.axes.up).real(),
-            Condition::Touchdown => self.ground - look.now.local.altitude.real(),
+            Condition::Touchdown => self.depth(look),
         }
     }
 
