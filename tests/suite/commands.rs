@@ -92,7 +92,7 @@ fn a_stale_report_is_status_one_and_names_the_file() {
     fs::write(&source, &text).unwrap();
     assert_eq!(stagewright(folder.path(), &["report", "plover.wright"]).status, 0);
     assert_eq!(stagewright(folder.path(), &["report", "--verify", "plover.wright"]).status, 0);
-    fs::write(&source, text.replace("198 kg", "199 kg")).unwrap();
+    fs::write(&source, text.replace("152 kg", "153 kg")).unwrap();
     let run = stagewright(folder.path(), &["report", "--verify", "plover.wright"]);
     assert_eq!(run.status, 1);
     assert!(run.err.contains("report.md"), "{}", run.err);

