@@ -43,6 +43,28 @@ fn every_example_of_the_manual_compiles() {
     }
 }
 
+/// A unit stands only after a number, and no word that may follow a number is a unit.
+#[test]
+fn units_and_words_of_the_language_are_disjoint() {
+    for symbol in UnitTable::builtin().symbols() {
+        assert!(!stagewright::syntax::is_keyword(symbol), "{symbol}");
+    }
+}
+
+/// Every flight quantity and every heading of a committed report has its origin on record.
+#[test]
+fn the_vocabulary_knows_what_the_program_says() {
+    let vocabulary = fs::read_to_string(root().join("docs/vocabulary.md")).unwrap();
+    let report = fs::read_to_string(root().join("missions/lantern.report/report.md")).unwrap();
+    for heading in report.lines().filter_map(|line| line.strip_prefix("## ")) {
+        let word = heading.split([',', ':']).next().unwrap().to_lowercase();
+        assert!(vocabulary.to_lowercase().contains(&word), "{heading}");
+    }
+    for name in ["check", "fly", "report", "model", "explain", "builtin", "completions", "manpages"] {
+        assert!(vocabulary.contains(&format!("`{name}`")), "{name}");
+    }
+}
+
 /// Compares the part of a document between two marks with what it should say, or writes it.
 fn keep(document: &str, mark: &str, wanted: &str) {
     let path = root().join(document);
