@@ -40,7 +40,14 @@ impl<'a> Context<'a> {
                 let mend = format!("{} {mend}", self.text(literal.digits));
                 pounds_confused::found(expr.span, what, written, &found_words, &expected, &mend)
             }
-            _ => dimension_mismatch::found(expr.span, what, written, &found_words, &expected),
+            _ => {
+                let units = self.units_of(scope, want.dimension);
+                let mismatch = dimension_mismatch::found(expr.span, what, written, &found_words, &expected);
+                match units.is_empty() {
+                    true => mismatch,
+                    false => mismatch.help(format!("it is written in a unit such as {}", units.join(", "))),
+                }
+            }
         };
         let diagnostic = match self.defined_at(scope, expr) {
             Some(defined) => diagnostic.and(defined, format!("defined here as {found_words}")),

@@ -20,7 +20,8 @@ mission Hop {
     start    pad altitude 0 m
     payload  100 kg
     phase Up { burn Sedge; steer upright; until Sedge spent; shed Sedge }
-    phase On { burn Sedge; steer upright; until 6 s }
+    phase On { burn Rush; steer upright; until 6 s }
+    phase Again { burn Sedge; steer upright; until 6 s }
 }
 "#,
     mended: r#"world Slate { gravity uniform 1.62 m/s^2; surface flat; air none }

@@ -45,7 +45,8 @@ mission Hop {
 };
 
 pub fn found(span: Span, part: &str, carried: &str) -> Diagnostic {
-    CODE.at(span, format!("`{part}` has {carried} engines"), "not a number of its engines")
+    let engines = if carried == "1" { "engine" } else { "engines" };
+    CODE.at(span, format!("`{part}` has {carried} {engines}"), "not a number of its engines")
         .help(format!("write `with N of {carried} engines`, N not above {carried}"))
 }
 

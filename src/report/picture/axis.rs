@@ -2,6 +2,9 @@
 
 use crate::quantity::format_number;
 
+/// A share of a step by which a value may lie beyond the last mark: less than the eye sees.
+const HAIR: f64 = 1e-3;
+
 /// A linear scale from values to places on the page.
 #[derive(Clone, Copy, Debug)]
 pub struct Scale {
@@ -22,7 +25,12 @@ impl Scale {
     pub fn nice((low, high): (f64, f64), (from, to): (f64, f64), marks: usize) -> Self {
         let exact = Scale::exact((low, high), (from, to));
         let step = exact.step(marks);
-        Scale { low: (exact.low / step).floor() * step, high: (exact.high / step).ceil() * step, from, to }
+        Scale {
+            low: (exact.low / step + HAIR).floor() * step,
+            high: (exact.high / step - HAIR).ceil() * step,
+            from,
+            to,
+        }
     }
 
     pub fn place(&self, value: f64) -> f64 {
