@@ -40,20 +40,18 @@ impl<'a> Context<'a> {
                 let mend = format!("{} {mend}", self.text(literal.digits));
                 pounds_confused::found(expr.span, what, written, &found_words, &expected, &mend)
             }
-            _ => {
-                let units = self.units_of(scope, want.dimension);
-                let mismatch = dimension_mismatch::found(expr.span, what, written, &found_words, &expected);
-                match units.is_empty() {
-                    true => mismatch,
-                    false => mismatch.help(format!("it is written in a unit such as {}", units.join(", "))),
-                }
-            }
+            _ => dimension_mismatch::found(expr.span, what, written, &found_words, &expected),
         };
         let diagnostic = match self.defined_at(scope, expr) {
             Some(defined) => diagnostic.and(defined, format!("defined here as {found_words}")),
             None => diagnostic,
         };
         let diagnostic = help_with_angle(diagnostic, found, want.dimension);
+        let units = self.units_of(scope, want.dimension);
+        let diagnostic = match diagnostic.help.is_some() || units.is_empty() {
+            true => diagnostic,
+            false => diagnostic.help(format!("it is written in a unit such as {}", units.join(", "))),
+        };
         self.report(diagnostic);
         false
     }
