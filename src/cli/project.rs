@@ -16,6 +16,9 @@ impl Project {
     /// The project's folder is the nearest one above the file that holds a `.git`, else the file's own.
     pub fn of(file: &Path) -> io::Result<Project> {
         let file = fs::canonicalize(file)?;
+        if file.is_dir() {
+            return Err(io::Error::other("is a folder"));
+        }
         let folder = file.parent().ok_or_else(|| io::Error::other("not a file"))?;
         let root = folder.ancestors().find(|above| above.join(".git").exists()).unwrap_or(folder);
         let relative = file.strip_prefix(root).map_err(io::Error::other)?;

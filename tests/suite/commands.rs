@@ -11,6 +11,7 @@ fn exit_statuses_are_those_of_the_charter() {
     assert_eq!(stagewright(&here, &["check", "missions/lantern.wright"]).status, 0);
     assert_eq!(stagewright(&here, &["fly", "missions/overreach.wright"]).status, 1);
     assert_eq!(stagewright(&here, &["check", "missions/no-such-file.wright"]).status, 2);
+    assert_eq!(stagewright(&here, &["check", "missions"]).status, 2);
     assert_eq!(stagewright(&here, &["chekc"]).status, 2);
     assert_eq!(stagewright(&here, &["fly", "--tolerance", "7", "missions/lantern.wright"]).status, 2);
     assert_eq!(stagewright(&here, &["check", "tests/cases/unknown-name.wright"]).status, 3);
