@@ -127,6 +127,10 @@ impl<S: Scalar> Stepper<S> {
         let mut grow = GROW;
         let mut size = self.next_size;
         loop {
+            // Without a derivative there is no size of a first step.
+            if !size.is_finite() {
+                return Err(StepFailure::NotFinite);
+            }
             // A rest shorter than a hundredth of a step is taken along.
             let last = size * 1.01 >= room;
             let taken = if last { limit - start } else { S::from(size) };
