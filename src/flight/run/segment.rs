@@ -25,6 +25,9 @@ impl<'p, S: Scalar> Run<'p, '_, S> {
             return self.burnt_out(part, None);
         }
         self.choose_throttle();
+        if let Some(failure) = self.out_of_range() {
+            return Err(failure);
+        }
         let watches = self.watches();
         let mut stops = self.stops();
         self.book.history.begin(&self.motion);
@@ -145,17 +148,27 @@ impl<'p, S: Scalar> Run<'p, '_, S> {
                 Ok(After::Ends(condition))
             }
             Watch::Layer(..) => Ok(After::Switch),
-            Watch::Piece(..) => {
-                let knots = drag_knots(&self.motion);
-                let (low, high) = (knots.first().copied(), knots.last().copied());
-                let input = self.look(|look| look.now.mach.real());
-                Err(self.failure(Cause::CurveRange {
-                    input,
-                    low: low.unwrap_or(0.0),
-                    high: high.unwrap_or(0.0),
-                }))
-            }
+            Watch::Piece(..) => Err(self.curve_range()),
         }
+    }
+
+    /// What stops the flight where it reads the drag curve outside a range that it refuses to leave
+    /// already at the start of a segment.
+    fn out_of_range(&self) -> Option<Failure> {
+        let Drag::Curve { table, .. } = &self.plan.drag else { return None };
+        let (low, high) = (table.knots().first()?, table.knots().last()?);
+        let (mach, air) = self.look(|look| (look.now.mach.real(), look.now.air.is_some()));
+        // A phase that ends at the curve's own end may stand past it by a rounding.
+        let slack = 1e-9 * (high - low);
+        let outside = mach < low - slack || mach > high + slack;
+        (table.refuses() && air && outside).then(|| self.curve_range())
+    }
+
+    fn curve_range(&self) -> Failure {
+        let knots = drag_knots(&self.motion);
+        let (low, high) = (knots.first().copied(), knots.last().copied());
+        let input = self.look(|look| look.now.mach.real());
+        self.failure(Cause::CurveRange { input, low: low.unwrap_or(0.0), high: high.unwrap_or(0.0) })
     }
 
     /// Notes what does not stop the flight.

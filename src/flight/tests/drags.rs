@@ -1,13 +1,13 @@
 //! Drag against closed forms.
 
 use super::build::{
-    G0, after, body, burn, coast, curve, drag, earth, engine, exponential, flat, mission, pad, stage, state,
-    value,
+    G0, after, body, burn, coast, compare, curve, drag, earth, engine, exponential, flat, mission, pad,
+    stage, state, value,
 };
 use super::{close, end, flown, get, near};
 use crate::flight::{Cause, Completion, Settings, fly};
 use crate::math::Scalar;
-use crate::model::{Beyond, Condition, Drag, Mission, Phase, Quantity, Smoothness, Steer, World};
+use crate::model::{Beyond, Comparison, Condition, Drag, Mission, Phase, Quantity, Smoothness, Steer, World};
 
 /// 80 kg with a drag area of 0.7 m² in air of constant density (an endless scale height).
 fn parachutist(velocity: f64, phase: Phase) -> Mission {
@@ -108,6 +108,36 @@ fn knots() {
     let Cause::CurveRange { input, low, high } = failure.cause else { panic!("{:?}", failure.cause) };
     close(input, 0.6, 1e-9);
     assert_eq!((low, high), (0.0, 0.6));
+}
+
+/// A curve that starts above rest stops a flight that starts at rest.
+#[test]
+fn below_a_curve() {
+    let world = World { air: exponential(1.225, 0.0, 1e30), ..flat(G0) };
+    let start = state([0.0, 0.0, 1e5], [0.0; 3]);
+    let mut mission = mission(world, start, vec![body(5000.0)], vec![coast(after(60.0))]);
+    let curve = curve(&[0.3, 0.6], &[0.3, 0.9], Smoothness::Linear, Beyond::Refuse);
+    mission.vehicle.drag = Drag::Curve { curve, reference_area: value(1.0) };
+    let Completion::Failed(failure) = fly(&mission, &Settings::default()).completion else {
+        panic!("read below its range")
+    };
+    assert_eq!(failure.cause, Cause::CurveRange { input: 0.0, low: 0.3, high: 0.6 });
+    assert_eq!(failure.time, 0.0);
+}
+
+/// A phase may end at the very end of a curve, if the flight turns back into it from there.
+#[test]
+fn at_the_end_of_a_curve() {
+    let world = World { air: exponential(1.225, 0.0, 1e30), ..flat(0.0) };
+    let parts = vec![stage(400.0, 600.0, engine(5e4, 250.0))];
+    let boost = burn(&[0], Steer::Upright, compare(Quantity::Mach, Comparison::AtLeast, 1.5));
+    let start = state([0.0, 0.0, 1e3], [0.0; 3]);
+    let mut mission = mission(world, start, parts, vec![boost, coast(after(5.0))]);
+    let curve = curve(&[0.0, 0.7, 1.5], &[0.3, 0.5, 0.4], Smoothness::Smooth, Beyond::Refuse);
+    mission.vehicle.drag = Drag::Curve { curve, reference_area: value(0.1) };
+    let flight = flown(&mission);
+    near(get(&flight.phases[0].end, Quantity::Mach), 1.5, 1e-9);
+    assert!(get(end(&flight), Quantity::Mach) < 1.5);
 }
 
 /// Air turns with the body: at rest over the ground there is no airspeed, whatever the inertial speed.
