@@ -1,5 +1,7 @@
 //! Every flight quantity, read off an instant.
 
+use std::cell::OnceCell;
+
 use super::attitude;
 use super::instant::Instant;
 use super::motion::{BACK_PRESSURE, DRAG, GRAVITY, Motion, PAID, STEERING, direction};
@@ -14,11 +16,13 @@ pub struct Look<'a, 'p, S> {
     pub motion: &'a Motion<'p, S>,
     pub now: Instant<S>,
     state: &'a [S],
+    /// Worked out once for all its elements.
+    orbit: OnceCell<Option<Orbit<S>>>,
 }
 
 impl<'a, 'p, S: Scalar> Look<'a, 'p, S> {
     pub fn new(motion: &'a Motion<'p, S>, time: S, state: &'a [S]) -> Self {
-        Look { motion, now: Instant::new(motion, time, state), state }
+        Look { motion, now: Instant::new(motion, time, state), state, orbit: OnceCell::new() }
     }
 
     /// The value of a reading; not a number where it does not exist.
@@ -45,7 +49,8 @@ impl<'a, 'p, S: Scalar> Look<'a, 'p, S> {
     }
 
     fn orbit(&self) -> Option<Orbit<S>> {
-        self.motion.plan.mu.map(|mu| Orbit::new(self.now.position, self.now.velocity, mu))
+        let orbit = |mu| Orbit::new(self.now.position, self.now.velocity, mu);
+        *self.orbit.get_or_init(|| self.motion.plan.mu.map(orbit))
     }
 
     fn body_fixed(&self) -> Vector<S> {

@@ -152,7 +152,7 @@ impl<S: Scalar> Stepper<S> {
                 let next = taken.real() * factor.min(grow);
                 // A step cut short by the limit says little against the size that was meant.
                 self.next_size = if last { next.max(size.min(self.next_size)) } else { next };
-                self.accept(field, start, taken, if last { limit } else { start + taken });
+                self.accept(field, start, if last { limit } else { start + taken });
                 return Ok(());
             }
             size = taken.real() * factor.min(1.0);
@@ -168,7 +168,7 @@ impl<S: Scalar> Stepper<S> {
         std::mem::swap(&mut self.rate, &mut self.stages[0]);
         self.steps -= 1;
         self.try_step(field, start, time - start);
-        self.accept(field, start, time - start, time);
+        self.accept(field, start, time);
     }
 
     /// Fills the stages and `work`, the state at the end, from `y1` and `rate`.
@@ -200,8 +200,7 @@ impl<S: Scalar> Stepper<S> {
         if weighted == 0.0 { 0.0 } else { size.abs() * fifth / (weighted * self.work.len() as f64).sqrt() }
     }
 
-    fn accept(&mut self, field: &mut impl Field<S>, start: S, size: S, end: S) {
-        let _ = size;
+    fn accept(&mut self, field: &mut impl Field<S>, start: S, end: S) {
         field.rate(end, &self.work, &mut self.stages[12]);
         self.evaluations += 1;
         self.steps += 1;

@@ -51,16 +51,18 @@ impl<'p, S: Scalar> Run<'p, '_, S> {
             let last = Look::new(&motion, stepper.end_time(), stepper.end_state());
             let mut after = watches.values(&last);
             let found = watches.earliest(&dense, &before, &after, &last);
+            let mut noted = Noted::new(&last);
             if let Some((time, _)) = found.filter(|(time, _)| *time < stepper.end_time().real()) {
                 stepper.redo(&mut motion, S::from(time.max(stepper.start_time().real())));
                 dense = stepper.dense(&mut motion);
-                after = watches.values(&Look::new(&motion, stepper.end_time(), stepper.end_state()));
+                let last = Look::new(&motion, stepper.end_time(), stepper.end_state());
+                (after, noted) = (watches.values(&last), Noted::new(&last));
             }
             self.book.history.push(dense);
             self.follow(&stepper);
-            self.notice(&Look::new(&motion, stepper.end_time(), stepper.end_state()));
+            let sunk = watches.list.contains(&Watch::Ground) && noted.altitude < watches.ground - SUNK;
+            self.notice(noted);
             before = after;
-            let sunk = self.below(&watches) > SUNK;
             match found {
                 None if !sunk => {}
                 Some((_, Watch::Layer(layer, _))) if !sunk => {
@@ -90,12 +92,6 @@ impl<'p, S: Scalar> Run<'p, '_, S> {
     fn go_on(&mut self, motion: &Motion<'p, S>, layer: usize, piece: usize) {
         (self.motion.layer, self.motion.piece) = (layer, piece);
         self.book.history.join(motion);
-    }
-
-    /// How far the vehicle is below ground that nothing but a touch-down may reach, m.
-    fn below(&self, watches: &Watches<S>) -> f64 {
-        let altitude = self.plan.surface.local(self.position).altitude.real();
-        if watches.list.contains(&Watch::Ground) { watches.ground - altitude } else { 0.0 }
     }
 
     /// Takes over the state at the end of the last step.
@@ -172,17 +168,15 @@ impl<'p, S: Scalar> Run<'p, '_, S> {
     }
 
     /// Notes what does not stop the flight.
-    fn notice(&mut self, look: &Look<S>) {
-        let time = look.now.time.real();
+    fn notice(&mut self, noted: Noted) {
+        let time = self.time.real();
         if !self.motion.lit.is_empty() {
-            self.book.throttled(look.now.throttle.real());
+            self.book.throttled(noted.throttle);
         }
-        if let (Throttle::Floor, Some(hold)) =
-            (self.motion.throttle, &self.plan.phases[self.motion.phase].hold)
-        {
-            self.book.exceeded(self.motion.phase, excess(hold, &look.now).real(), hold.limit.real(), time);
+        if let Some((excess, limit)) = noted.excess {
+            self.book.exceeded(self.motion.phase, excess, limit, time);
         }
-        if let Some(top) = self.plan.air.top().filter(|top| look.now.local.altitude.real() > *top) {
+        if let Some(top) = self.plan.air.top().filter(|top| noted.altitude > *top) {
             self.book.above_air(top, time);
         }
     }
@@ -193,6 +187,26 @@ impl<'p, S: Scalar> Run<'p, '_, S> {
             StepFailure::NotFinite => "a number was not finite".to_owned(),
         };
         self.failure(Cause::Numerical { detail })
+    }
+}
+
+/// What of the end of a step may be worth a note.
+struct Noted {
+    altitude: f64,
+    throttle: f64,
+    /// By how much a hold at the engines' least exceeds its limit, and the limit.
+    excess: Option<(f64, f64)>,
+}
+
+impl Noted {
+    fn new<S: Scalar>(look: &Look<S>) -> Self {
+        let hold = look.motion.plan.phases[look.motion.phase].hold.as_ref();
+        let floor = hold.filter(|_| look.motion.throttle == Throttle::Floor);
+        Noted {
+            altitude: look.now.local.altitude.real(),
+            throttle: look.now.throttle.real(),
+            excess: floor.map(|hold| (excess(hold, &look.now).real(), hold.limit.real())),
+        }
     }
 }
 
