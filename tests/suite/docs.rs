@@ -84,6 +84,26 @@ fn keep(document: &str, mark: &str, wanted: &str) {
     }
 }
 
+/// The rules of the grammar that have a comment, with it.
+fn rules() -> String {
+    let grammar = fs::read_to_string(root().join("grammar/stagewright.pest")).unwrap();
+    let mut text = String::from("| rule | what it reads |\n|---|---|\n");
+    let mut comment = String::new();
+    for line in grammar.lines() {
+        if let Some(words) = line.strip_prefix("///") {
+            comment.push_str(words);
+            continue;
+        }
+        if let Some((name, _)) = line.split_once('=')
+            && !comment.is_empty()
+        {
+            text.push_str(&format!("| `{}` |{} |\n", name.trim(), comment.replace('|', "\\|")));
+        }
+        comment.clear();
+    }
+    text
+}
+
 /// One test for all parts, because they are written into one file.
 #[test]
 fn the_generated_parts_of_the_manual_are_current() {
@@ -128,6 +148,7 @@ fn the_generated_parts_of_the_manual_are_current() {
         list.push_str(&format!("| `{}` | {severity} | {} |\n", code.name, code.title));
     }
     keep("docs/manual.md", "codes", &list);
+    keep("docs/manual.md", "grammar", &rules());
 }
 
 /// What the README shows of a source and of its report stands in them.
