@@ -48,6 +48,24 @@ fn the_smooth_kind_keeps_lines_and_steps() {
     assert_eq!(step.at(0.5, 0.0), 0.0);
 }
 
+/// SciPy 1.17.1's `PchipInterpolator`, an implementation of the same slopes, on uneven points.
+#[test]
+fn the_smooth_kind_is_that_of_another_implementation() {
+    let points = [0.0, 0.5, 0.9, 1.0, 1.2, 2.0, 5.0];
+    let table = table(Smoothness::Smooth, Beyond::Hold, &points, &[0.3, 0.32, 0.45, 0.6, 0.58, 0.4, 0.25]);
+    for (x, expected) in [
+        (0.25, 0.3054153605015674),
+        (0.7, 0.3580073342402555),
+        (0.95, 0.5326650943396225),
+        (1.1, 0.5932142857142857),
+        (1.6, 0.48647012987012983),
+        (3.5, 0.29002272727272727),
+        (4.9, 0.2501883434343434),
+    ] {
+        assert!((table.at(x, 0.0) - expected).abs() < 1e-15, "{x}");
+    }
+}
+
 #[test]
 fn two_inputs_make_a_plane() {
     let plane: Vec<f64> =
@@ -68,5 +86,25 @@ proptest! {
         let (low, high) = (values[left].min(values[left + 1]), values[left].max(values[left + 1]));
         let value = table.at(x, 0.0);
         prop_assert!(value >= low - 1e-12 && value <= high + 1e-12);
+    }
+
+    /// Rising values on uneven points make a rising curve, also between two looks within a piece.
+    #[test]
+    fn rising_values_make_a_rising_curve(
+        widths in prop::collection::vec(0.01..3.0_f64, 6),
+        rises in prop::collection::vec(0.0..5.0_f64, 6),
+    ) {
+        let sums = |steps: &[f64]| -> Vec<f64> {
+            let running = steps.iter().scan(0.0, |sum, step| { *sum += step; Some(*sum) });
+            std::iter::once(0.0).chain(running).collect()
+        };
+        let (points, values) = (sums(&widths), sums(&rises));
+        let table = table(Smoothness::Smooth, Beyond::Hold, &points, &values);
+        let mut before = table.at(0.0, 0.0);
+        for look in 1..=200 {
+            let value = table.at(points[6] * f64::from(look) / 200.0, 0.0);
+            prop_assert!(value >= before - 1e-12);
+            before = value;
+        }
     }
 }

@@ -28,7 +28,8 @@ impl<S: Scalar> Dense<S> {
 
     /// The whole state at a time within the step.
     pub fn state(&self, time: S, state: &mut [S]) {
-        let at = (time - self.start) / self.size;
+        // An event at a step's very start leaves a step of no length.
+        let at = if self.size.real() == 0.0 { S::zero() } else { (time - self.start) / self.size };
         let rest = S::one() - at;
         for (value, piece) in state.iter_mut().zip(self.coefficients.chunks_exact(8)) {
             *value = polynomial(piece, at, rest);

@@ -1,8 +1,12 @@
 //! Numerical integration: adaptive steps, dense output, roots and extrema.
 
+#[cfg(test)]
+mod checks_tests;
 mod coefficients;
 mod dense;
 mod extremum;
+#[cfg(test)]
+mod order_tests;
 mod root;
 mod stepper;
 #[cfg(test)]

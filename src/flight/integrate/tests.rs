@@ -1,6 +1,6 @@
 use super::{Field, Stepper, Tolerance, maximum, root};
 
-struct System<F>(F);
+pub(super) struct System<F>(pub F);
 
 impl<F: FnMut(f64, &[f64], &mut [f64])> Field<f64> for System<F> {
     fn rate(&mut self, time: f64, state: &[f64], rate: &mut [f64]) {
@@ -8,7 +8,12 @@ impl<F: FnMut(f64, &[f64], &mut [f64])> Field<f64> for System<F> {
     }
 }
 
-fn run(relative: f64, end: f64, start: &[f64], f: impl FnMut(f64, &[f64], &mut [f64])) -> (Vec<f64>, u64) {
+pub(super) fn run(
+    relative: f64,
+    end: f64,
+    start: &[f64],
+    f: impl FnMut(f64, &[f64], &mut [f64]),
+) -> (Vec<f64>, u64) {
     let mut field = System(f);
     let mut stepper = Stepper::new(Tolerance { relative, absolute: vec![relative * 1e-3; start.len()] });
     stepper.start(&mut field, 0.0, start, None);
@@ -18,7 +23,7 @@ fn run(relative: f64, end: f64, start: &[f64], f: impl FnMut(f64, &[f64], &mut [
     (stepper.end_state().to_vec(), stepper.evaluations())
 }
 
-fn two_body(_: f64, y: &[f64], rate: &mut [f64]) {
+pub(super) fn two_body(_: f64, y: &[f64], rate: &mut [f64]) {
     let cube = (y[0] * y[0] + y[1] * y[1]).sqrt() * (y[0] * y[0] + y[1] * y[1]);
     rate.copy_from_slice(&[y[2], y[3], -y[0] / cube, -y[1] / cube]);
 }
