@@ -165,6 +165,7 @@ impl<'p, 's, S: Scalar> Run<'p, 's, S> {
         self.motion.phase = index;
         self.motion.phase_start = self.time;
         self.motion.throttle = Throttle::Commanded;
+        self.throttle_chosen = false;
         self.shed = vec![false; phase.sheds.len()];
         self.conditions = vec![None; phase.until.len()];
         let state = self.snapshot();

@@ -75,6 +75,12 @@ impl<S: Scalar> Run<'_, '_, S> {
         part.usable - reserve.min(part.usable)
     }
 
+    /// A lit part that has nothing to burn at the start of a segment: all of it is unusable or reserve.
+    pub(super) fn nothing_left(&self) -> Option<usize> {
+        let mut lit = self.motion.lit.iter().map(|lit| lit.part);
+        lit.find(|part| self.burnable(*part).real() <= self.motion.burnt[*part].real())
+    }
+
     /// A part has burnt down to its reserve: the phase ends by it, or the others burn on.
     pub(super) fn burnt_out(&mut self, part: usize, burnable: Option<S>) -> Flown<After> {
         self.spent[part] = true;

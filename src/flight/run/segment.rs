@@ -24,6 +24,9 @@ impl<'p, S: Scalar> Run<'p, '_, S> {
         if let Some(part) = self.curve_over() {
             return self.burnt_out(part, None);
         }
+        if let Some(part) = self.nothing_left() {
+            return self.burnt_out(part, None);
+        }
         self.choose_throttle();
         if let Some(failure) = self.out_of_range() {
             return Err(failure);
