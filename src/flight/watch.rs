@@ -1,6 +1,6 @@
 //! What is watched during a segment, and where in a step it comes about.
 
-use super::integrate::{Dense, root};
+use super::integrate::{Dense, maximum, root};
 use super::motion::Motion;
 use super::plan::{Condition, Drag};
 use super::quantities::Look;
@@ -42,6 +42,8 @@ const TOUCH: f64 = 1e-6;
 /// Where within a step the list is looked at, as shares of the step, beside its ends: enough to see
 /// two crossings of one step apart.
 const LOOKS: [f64; 3] = [0.25, 0.5, 0.75];
+/// How near its ends a step is looked at to see which way a watch goes there, as a share of it.
+const EDGE: f64 = 1e-3;
 
 impl<S: Scalar> Watches<S> {
     pub fn new(motion: &Motion<S>, burnable: Vec<S>, list: Vec<Watch>) -> Self {
@@ -138,27 +140,45 @@ impl<S: Scalar> Watches<S> {
                 found = Some((time, watch));
             }
         };
-        let mut within: Vec<(f64, Vec<f64>)> = Vec::new();
-        if (0..self.list.len()).any(|index| self.may_turn(index, before, after)) {
-            for share in LOOKS {
-                let time = start + (end - start) * share;
-                look(time, &mut |look| within.push((time, self.values(look))));
+        let mut glance = |share: f64| {
+            let (time, mut values) = (start + (end - start) * share, Vec::new());
+            look(time, &mut |look| values = self.values(look));
+            (time, values)
+        };
+        let any = |is: &dyn Fn(usize) -> bool| (0..self.list.len()).any(is);
+        let turns = any(&|index| self.may_turn(index, before, after));
+        let within = if turns { LOOKS.map(&mut glance).to_vec() } else { Vec::new() };
+        // A watch that rises at first and is no nearer at the end has a summit between.
+        let mut closely = Vec::new();
+        if any(&|index| self.is_quiet(index, before, after)) {
+            closely.push(glance(EDGE));
+            if turns
+                || any(&|index| self.is_quiet(index, before, after) && closely[0].1[index] > before[index])
+            {
+                closely.extend(if turns { within.clone() } else { LOOKS.map(&mut glance).to_vec() });
+                closely.push(glance(1.0 - EDGE));
             }
         }
         for (index, watch) in self.list.iter().enumerate() {
-            let (mut low, mut at_low) = (start, before[index]);
-            let inner = within.iter().map(|(time, values)| (*time, values[index]));
-            for (high, at_high) in inner.chain([(end, after[index])]) {
-                if at_low < 0.0 && at_high >= 0.0 {
-                    let time = root(low, high, |time| {
-                        let mut value = 0.0;
-                        look(time, &mut |look| value = self.value(*watch, look));
-                        value
-                    });
-                    offer(time, *watch);
-                    break;
-                }
-                (low, at_low) = (high, at_high);
+            let seen = |inner: &[(f64, Vec<f64>)]| -> Vec<(f64, f64)> {
+                let inner = inner.iter().map(|(time, values)| (*time, values[index]));
+                [(start, before[index])].into_iter().chain(inner).chain([(end, after[index])]).collect()
+            };
+            let mut value = |time: f64| {
+                let mut value = 0.0;
+                look(time, &mut |look| value = self.value(*watch, look));
+                value
+            };
+            let found = crossing(&seen(&within)).or_else(|| {
+                let seen = seen(&closely);
+                crossing(&seen).or_else(|| {
+                    let (low, high) = hidden_summit(&seen)?;
+                    let (summit, height) = maximum(low, high, &mut value);
+                    (height >= 0.0).then_some((low, summit))
+                })
+            });
+            if let Some((low, high)) = found {
+                offer(root(low, high, value), *watch);
             }
         }
         for watch in [layer_left(last), piece_left(last)].into_iter().flatten() {
@@ -172,6 +192,12 @@ impl<S: Scalar> Watches<S> {
         found
     }
 
+    /// Whether a watch has not come about at either end of a step, and may have between. Propellant
+    /// only gets less, so its watch never turns.
+    fn is_quiet(&self, index: usize, before: &[f64], after: &[f64]) -> bool {
+        !matches!(self.list[index], Watch::Spent(_)) && before[index] < 0.0 && after[index] < 0.0
+    }
+
     /// Whether a watch that is quiet at both ends of a step may have come about between: it is nearer
     /// at the end than at the start. Propellant only gets less, so its watch never turns.
     fn may_turn(&self, index: usize, before: &[f64], after: &[f64]) -> bool {
@@ -179,6 +205,24 @@ impl<S: Scalar> Watches<S> {
         !matches!(self.list[index], Watch::Spent(_)) && before < 0.0 && after < 0.0 && after > before
             || before >= 0.0 && after < 0.0
     }
+}
+
+/// The first two of the points seen between which a watch comes about.
+fn crossing(seen: &[(f64, f64)]) -> Option<(f64, f64)> {
+    let pair = seen.windows(2).find(|pair| pair[0].1 < 0.0 && pair[1].1 >= 0.0)?;
+    Some((pair[0].0, pair[1].0))
+}
+
+/// Between which of the points seen, all below zero, a summit may lie that is not: beside the greatest,
+/// if the slopes around it reach so far.
+fn hidden_summit(seen: &[(f64, f64)]) -> Option<(f64, f64)> {
+    let greatest = (1..seen.len().saturating_sub(1)).max_by(|a, b| seen[*a].1.total_cmp(&seen[*b].1))?;
+    let [before, here, after] = seen.get(greatest - 1..=greatest + 1)? else { return None };
+    let summit = here.1 < 0.0 && here.1 >= before.1 && here.1 >= after.1;
+    // No concave function rises further than the slopes at its sides carry it.
+    let slope = |a: &(f64, f64), b: &(f64, f64)| ((b.1 - a.1) / (b.0 - a.0)).abs();
+    let reach = slope(before, here).max(slope(here, after)) * (after.0 - before.0);
+    (summit && here.1 + reach >= 0.0).then_some((before.0, after.0))
 }
 
 fn rising(up: bool, value: f64) -> f64 {
