@@ -4,9 +4,12 @@ mod build;
 mod burns;
 mod drags;
 mod ledgers;
+mod odd;
 mod orbits;
 mod phases;
 mod summits;
+mod text;
+mod textbook;
 mod throttles;
 
 use super::{Completion, EventKind, Flight, Settings, Snapshot, fly};
