@@ -52,8 +52,8 @@ pub enum Cause {
     GroundImpact { speed: f64 },
     /// A phase went on past the limit of time (s) or steps without its `until` coming true.
     NeverEnds { after: f64 },
-    /// The drag curve was read at a Mach number outside its range.
-    CurveRange { input: f64, low: f64, high: f64 },
+    /// The drag curve was read outside its range: at a Mach number, or at a second input (m or rad).
+    CurveRange { input: Quantity, value: f64, low: f64, high: f64 },
     /// A lit part has no usable propellant left and the phase does not end by it.
     RanDry { part: usize },
     /// The step became too small, or a number was not finite.

@@ -42,6 +42,11 @@ impl<S: Scalar> Table<S> {
         &self.first
     }
 
+    /// The ends of the second input, if there is one.
+    pub fn second_range(&self) -> Option<(f64, f64)> {
+        self.second.first().copied().zip(self.second.last().copied())
+    }
+
     /// Whether reading outside the range stops the flight.
     pub fn refuses(&self) -> bool {
         self.beyond == Beyond::Refuse

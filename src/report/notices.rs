@@ -47,12 +47,9 @@ impl Finding {
             }
             "never-ends" => format!("`{}` did not end within {}.", word(0), word(1)),
             "ran-dry" => format!("`{}` ran dry at {}, before `{}` ended.", word(0), word(2), word(1)),
-            "curve-range" => format!(
-                "The drag curve, which covers Mach {}, was read at Mach {} at {}.",
-                word(1),
-                word(0),
-                word(2)
-            ),
+            "curve-range" => {
+                format!("The drag curve, which covers {}, was read at {} at {}.", word(1), word(0), word(2))
+            }
             _ => format!("In `{}` the flight broke down at {}: {}.", word(0), word(1), word(2)),
         }
     }
@@ -124,9 +121,19 @@ fn of_failure(mission: &Mission, phase: usize, time: f64, cause: &Cause) -> Opti
         Cause::RanDry { part } => {
             ("ran-dry", vec![mission.vehicle.parts.get(*part)?.name.clone(), name, seconds(time)])
         }
-        Cause::CurveRange { input, low, high } => {
-            let range = format!("{} to {}", format_number(*low, 4), format_number(*high, 4));
-            ("curve-range", vec![format_number(*input, 4), range, seconds(time)])
+        Cause::CurveRange { input, value, low, high } => {
+            let unit = input.customary_unit();
+            let name =
+                if *input == Quantity::Mach { "Mach".to_owned() } else { input.name().replace('_', " ") };
+            let scale = UnitTable::builtin().parse(unit).map_or(1.0, |unit| unit.factor);
+            let end = if unit.is_empty() { String::new() } else { format!(" {unit}") };
+            let read = format!("{name} {}{end}", format_number(value / scale, 4));
+            let range = format!(
+                "{name} {} to {}{end}",
+                format_number(low / scale, 4),
+                format_number(high / scale, 4)
+            );
+            ("curve-range", vec![read, range, seconds(time)])
         }
         Cause::Numerical { detail } => ("numerical-failure", vec![name, seconds(time), detail.clone()]),
     };

@@ -47,7 +47,7 @@ mission Heath {
 "#,
 };
 
-pub fn found(span: Span, mach: &str, range: &str, time: &str) -> Diagnostic {
-    CODE.at(span, format!("the drag curve is read at Mach {mach} at {time}, and ends before"), format!("covers Mach {range}"))
+pub fn found(span: Span, read: &str, range: &str, time: &str) -> Diagnostic {
+    CODE.at(span, format!("the drag curve is read at {read} at {time}, and ends before"), format!("covers {range}"))
         .help("add rows to the curve, or say `beyond hold`, `beyond zero` or `beyond extend`")
 }

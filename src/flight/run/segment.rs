@@ -3,12 +3,13 @@
 use super::{After, Flown, Run};
 use crate::flight::integrate::{StepFailure, Stepper, Tolerance};
 use crate::flight::motion::{COLUMNS, Motion};
-use crate::flight::plan::Drag;
+use crate::flight::plan::{Drag, Second};
 use crate::flight::quantities::Look;
 use crate::flight::result::{Cause, Failure};
 use crate::flight::throttle::{Throttle, excess};
 use crate::flight::watch::{Watch, Watches};
 use crate::math::{Scalar, Vector};
+use crate::model::Quantity;
 
 /// A phase that goes on longer than this never ends, s.
 pub(super) const LONGEST_PHASE: f64 = 400.0 * 86_400.0;
@@ -64,6 +65,10 @@ impl<'p, S: Scalar> Run<'p, '_, S> {
             self.book.history.push(dense);
             self.follow(&stepper);
             let sunk = watches.list.contains(&Watch::Ground) && noted.altitude < watches.ground - SUNK;
+            if let Some(cause) = noted.second.take() {
+                self.settle(&stepper);
+                return Err(self.failure(cause));
+            }
             self.notice(noted);
             before = after;
             match found {
@@ -166,8 +171,13 @@ impl<'p, S: Scalar> Run<'p, '_, S> {
     fn curve_range(&self) -> Failure {
         let knots = drag_knots(&self.motion);
         let (low, high) = (knots.first().copied(), knots.last().copied());
-        let input = self.look(|look| look.now.mach.real());
-        self.failure(Cause::CurveRange { input, low: low.unwrap_or(0.0), high: high.unwrap_or(0.0) })
+        let value = self.look(|look| look.now.mach.real());
+        self.failure(Cause::CurveRange {
+            input: Quantity::Mach,
+            value,
+            low: low.unwrap_or(0.0),
+            high: high.unwrap_or(0.0),
+        })
     }
 
     /// Notes what does not stop the flight.
@@ -199,6 +209,8 @@ struct Noted {
     throttle: f64,
     /// By how much a hold at the engines' least exceeds its limit, and the limit.
     excess: Option<(f64, f64)>,
+    /// The second input of the drag curve lies outside a range that it refuses to leave.
+    second: Option<Cause>,
 }
 
 impl Noted {
@@ -209,8 +221,29 @@ impl Noted {
             altitude: look.now.local.altitude.real(),
             throttle: look.now.throttle.real(),
             excess: floor.map(|hold| (excess(hold, &look.now).real(), hold.limit.real())),
+            second: second_out_of_range(look),
         }
     }
+}
+
+/// The failure of a drag curve whose second input has left its range, where there is air.
+fn second_out_of_range<S: Scalar>(look: &Look<S>) -> Option<Cause> {
+    let Drag::Curve { table, second, .. } = &look.motion.plan.drag else { return None };
+    let input = match second {
+        Second::None => return None,
+        Second::Altitude => Quantity::Altitude,
+        Second::AngleOfAttack => Quantity::AngleOfAttack,
+    };
+    let (low, high) = table.second_range()?;
+    let value = look.value(input).real();
+    let slack = 1e-9 * (high - low);
+    let outside = value < low - slack || value > high + slack;
+    (table.refuses() && look.now.air.is_some() && outside).then_some(Cause::CurveRange {
+        input,
+        value,
+        low,
+        high,
+    })
 }
 
 /// Mach numbers of the drag curve's knots.

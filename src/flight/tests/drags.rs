@@ -105,8 +105,8 @@ fn knots() {
     let Completion::Failed(failure) = fall(Beyond::Refuse).completion else {
         panic!("read beyond its range")
     };
-    let Cause::CurveRange { input, low, high } = failure.cause else { panic!("{:?}", failure.cause) };
-    close(input, 0.6, 1e-9);
+    let Cause::CurveRange { value, low, high, .. } = failure.cause else { panic!("{:?}", failure.cause) };
+    close(value, 0.6, 1e-9);
     assert_eq!((low, high), (0.0, 0.6));
 }
 
@@ -121,7 +121,7 @@ fn below_a_curve() {
     let Completion::Failed(failure) = fly(&mission, &Settings::default()).completion else {
         panic!("read below its range")
     };
-    assert_eq!(failure.cause, Cause::CurveRange { input: 0.0, low: 0.3, high: 0.6 });
+    assert_eq!(failure.cause, Cause::CurveRange { input: Quantity::Mach, value: 0.0, low: 0.3, high: 0.6 });
     assert_eq!(failure.time, 0.0);
 }
 

@@ -242,3 +242,33 @@ fn coast_on_a_pad() {
         assert!(flight.steps < 1000, "{until}");
     }
 }
+
+/// A drag curve over altitude as well is refused beyond its last altitude, as it is beyond its last
+/// Mach number.
+#[test]
+fn the_second_input_of_a_drag_curve_has_a_range_too() {
+    let flight = attempt(
+        "bring Earth from builtin
+         engine Wick { thrust 40 kN in vacuum; isp 250 s in vacuum; exit_area 0.05 m^2 }
+         stage Reed { engines 1 of Wick; dry 150 kg; propellant 300 kg }
+         curve ReedDrag {
+             mach, altitude [km] -> cd
+             0  0  0.4
+             0  2  0.4
+             9  0  0.6
+             9  2  0.6
+         }
+         vehicle Plover { stack Reed; reference_area 0.1 m^2; drag ReedDrag }
+         mission Heath {
+             flies Plover
+             within Earth
+             start pad latitude 68 deg longitude 21 deg altitude 300 m
+             payload 80 kg
+             phase Boost { burn Reed; steer upright; until Reed spent }
+         }",
+    );
+    let Completion::Failed(failure) = &flight.completion else { panic!("{:?}", flight.completion) };
+    let Cause::CurveRange { input, value, low, high } = failure.cause else { panic!("{:?}", failure.cause) };
+    assert_eq!((input, low, high), (Quantity::Altitude, 0.0, 2000.0));
+    assert!(value > 2000.0);
+}
